@@ -1,0 +1,2 @@
+/** Words of the office rooms. */
+export const office = {} as const satisfies Record<string, readonly [string, string]>;

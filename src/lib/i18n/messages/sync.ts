@@ -1,0 +1,2 @@
+/** Words of the sync rooms. */
+export const sync = {} as const satisfies Record<string, readonly [string, string]>;

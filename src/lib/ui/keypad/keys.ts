@@ -1,0 +1,22 @@
+/** The names of the keys. `and` parts the whole number from its fraction; `unit` switches the unit. */
+export type PadKey =
+	| '0'
+	| '1'
+	| '2'
+	| '3'
+	| '4'
+	| '5'
+	| '6'
+	| '7'
+	| '8'
+	| '9'
+	| '.'
+	| '/2'
+	| '/4'
+	| '/8'
+	| '/16'
+	| '/32'
+	| '/64'
+	| 'and'
+	| 'erase'
+	| 'unit';
