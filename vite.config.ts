@@ -48,6 +48,8 @@ const pwa = SvelteKitPWA({
 
 export default defineConfig(({ mode }) => ({
 	plugins: [showBuildError, tailwindcss(), sveltekit(), ...(mode === 'test' ? [] : [pwa])],
+	// The database's own files are none of the development server's business.
+	server: { watch: { ignored: ['**/.data*/**'] } },
 	test: {
 		include: ['tests/{reference,unit,architecture,server,security,sync}/**/*.test.ts'],
 		environment: 'node',

@@ -15,7 +15,9 @@ export default ts.config(
 		rules: {
 			// TypeScript knows undefined names better than the linter does.
 			'no-undef': 'off',
-			'@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+			'@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+			// Dates here are moments that are read, never state that is changed in place.
+			'svelte/prefer-svelte-reactivity': 'off',
 			// Paths are plain strings here; the application is served from the root only.
 			'svelte/no-navigation-without-resolve': 'off',
 			'no-restricted-syntax': [

@@ -11,7 +11,10 @@ export function findChromium(env = process.env) {
 	const set = env['CHROMIUM'];
 	if (set !== undefined && set !== '') {
 		if (isProgram(set)) return set;
-		throw new Trouble(`CHROMIUM is "${set}", which is no program.`, 'Set it to the path of Chromium, or leave it out.');
+		throw new Trouble(
+			`CHROMIUM is "${set}", which is no program.`,
+			'Set it to the path of Chromium, or leave it out.'
+		);
 	}
 	return programOnPath('chromium', `${env['PATH'] ?? ''}:/usr/bin`);
 }
@@ -30,7 +33,10 @@ export async function ensureChromium() {
 	await installPackages(['chromium']);
 	const installed = findChromium();
 	if (installed === null) {
-		throw new Trouble("Debian's package chromium brought no chromium.", 'Set CHROMIUM to the path of a browser.');
+		throw new Trouble(
+			"Debian's package chromium brought no chromium.",
+			'Set CHROMIUM to the path of a browser.'
+		);
 	}
 	note('Chromium installed.');
 	return installed;

@@ -1,12 +1,13 @@
 // The files of the private database: made whole or not at all, and freed of a PostgreSQL that an earlier,
 // killed command left running on them. To be called only by the holder of the data folder's lock.
 import { chownSync, existsSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
-import { dirname, join } from 'node:path';
+import { join } from 'node:path';
 import { makePrivateFolder } from './cluster-place.mjs';
 import { run } from './processes.mjs';
 import { Trouble, note } from './say.mjs';
 
 /** @typedef {import('./cluster-place.mjs').ClusterUser} ClusterUser */
+/** @typedef {import('./lock.mjs').Lock['adopt']} Adopt */
 
 /** Role that may do everything; only the set-up signs in with it. */
 export const adminRole = 'cogmark_admin';
@@ -22,14 +23,14 @@ export function madeBy(place) {
 
 /**
  * Makes a cluster that asks everyone for a password.
- * @param {{ place: string, binaries: string, user: ClusterUser, adminPassword: string }} options
+ * @param {{ place: string, binaries: string, user: ClusterUser, adminPassword: string, started: Adopt }} options
  */
-export async function makeCluster({ place, binaries, user, adminPassword }) {
+export async function makeCluster({ place, binaries, user, adminPassword, started }) {
 	// Made beside its place and moved there when complete: one broken off half-way is never taken for a database.
 	const draft = `${place}.new`;
 	rmSync(draft, { recursive: true, force: true });
 	makePrivateFolder(draft, user);
-	const passwordFile = join(dirname(place), `password.${process.pid}`);
+	const passwordFile = `${place}.password`;
 	try {
 		writeFileSync(passwordFile, adminPassword, { mode: 0o600 });
 		if ('uid' in user) chownSync(passwordFile, Number(user.uid), Number(user.gid));
@@ -45,7 +46,7 @@ export async function makeCluster({ place, binaries, user, adminPassword }) {
 				`--locale=${locale}`,
 				'--no-instructions'
 			],
-			{ cwd: draft, ...user }
+			{ cwd: draft, ...user, started }
 		);
 		if (code !== 0) {
 			throw new Trouble(

@@ -3,7 +3,7 @@
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
 import { chownSync, mkdirSync, readFileSync, statSync } from 'node:fs';
-import { join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { Trouble, note } from './say.mjs';
 
 /**
@@ -11,21 +11,24 @@ import { Trouble, note } from './say.mjs';
  * @typedef {{ uid: number, gid: number } | Record<string, never>} ClusterUser
  */
 
-/** Where data goes that the database's user cannot reach in the checkout; kept over a restart of the machine. */
+/** Data that the database's user cannot reach in the checkout goes here; it stays over a restart of the machine. */
 const sharedFolder = '/var/lib/cogmark';
 
 /**
  * The place for new data: in the data folder, or where the database's user can reach it.
  * @param {string} dataDir
- * @returns {string} folder of the cluster; it does not exist yet, its parent does
+ * @returns {boolean} true when it must be outside the data folder
  */
-export function choosePlace(dataDir) {
+export function mustLieOutside(dataDir) {
 	const user = newClusterUser();
-	if (!('uid' in user) || canEnter(dataDir, user)) return join(dataDir, 'postgres');
-	const place = join(sharedFolder, createHash('sha256').update(dataDir).digest('hex').slice(0, 16));
-	mkdirSync(sharedFolder, { recursive: true, mode: 0o711 });
-	note(`PostgreSQL's own user cannot enter ${dataDir}, so the database's files lie in ${place}.`);
-	return place;
+	if (!('uid' in user) || canEnter(dataDir, user)) return false;
+	note(`PostgreSQL's own user cannot enter ${dataDir}: the database's files go to ${outsidePlace(dataDir)}.`);
+	return true;
+}
+
+/** @param {string} dataDir */
+export function outsidePlace(dataDir) {
+	return join(sharedFolder, createHash('sha256').update(dataDir).digest('hex').slice(0, 16));
 }
 
 /** @returns {ClusterUser} the user for a cluster that is to be made */
@@ -59,11 +62,12 @@ export function ownerOf(place) {
 }
 
 /**
- * Makes a private folder for the database's user.
+ * Makes a private folder for the database's user; only that user and root see into it.
  * @param {string} path
  * @param {ClusterUser} user
  */
 export function makePrivateFolder(path, user) {
+	mkdirSync(dirname(path), { recursive: true, mode: 0o711 });
 	mkdirSync(path, { mode: 0o700 });
 	if ('uid' in user) chownSync(path, Number(user.uid), Number(user.gid));
 }
@@ -76,4 +80,3 @@ export function makePrivateFolder(path, user) {
 function canEnter(folder, user) {
 	return spawnSync('/bin/sh', ['-c', 'cd -- "$1"', 'sh', folder], { cwd: '/', ...user }).status === 0;
 }
-

@@ -44,20 +44,19 @@ export function end(code) {
 /**
  * Runs a command's work to its end.
  * @param {() => Promise<number>} work gives the exit code
- * @param {{ interrupted: number, failed?: () => void }} options exit code after Ctrl-C or a signal; what to add after a failure's report
+ * @param {{ interrupted: number }} options exit code after Ctrl-C or a signal
  */
-export async function live(work, { interrupted, failed }) {
+export async function live(work, { interrupted }) {
 	for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
 		process.on(signal, () => interrupt(interrupted));
 	}
+	// A closed terminal or a reader that has gone must not keep what runs from being stopped.
+	for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
 	if (process.env['npm_lifecycle_event'] !== undefined) watchParent(interrupted);
 	try {
 		await end(await work());
 	} catch (error) {
-		if (ending === null) {
-			report(error);
-			failed?.();
-		}
+		if (ending === null) report(error);
 		await end(1);
 	}
 }

@@ -2,6 +2,7 @@
 // missing or older than the lock.
 import { statSync } from 'node:fs';
 import { join } from 'node:path';
+import { aloneInCheckout } from './hold.mjs';
 import { run } from './processes.mjs';
 import { Trouble, note, step } from './say.mjs';
 import { root } from './settings.mjs';
@@ -30,10 +31,15 @@ export function modulesAreStale(folder) {
 }
 
 export async function ensureModules() {
+	if (modulesAreStale(root)) await aloneInCheckout('installing packages', install);
+}
+
+/** @param {import('./lock.mjs').Lock['adopt']} started */
+async function install(started) {
 	if (!modulesAreStale(root)) return;
 	step('Installing the packages of package-lock.json (npm ci, about a minute) …');
 	// Development packages build the application, so they are wanted even where NODE_ENV=production is set.
-	const { code, output } = await npm(['ci', '--include=dev']);
+	const { code, output } = await npm(['ci', '--include=dev'], { started });
 	if (code !== 0) {
 		throw new Trouble(
 			'npm ci failed; the packages are not installed.',

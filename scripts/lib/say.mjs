@@ -69,9 +69,13 @@ function systemTrouble(error) {
 			'Start as the user who owns it, or set DATA_DIR to a folder of your own.'
 		);
 	}
-	if (error.code === 'ENOSPC') return new Trouble(`The disk is full: ${path}`, 'Free some space and start again.');
+	if (error.code === 'ENOSPC')
+		return new Trouble(`The disk is full: ${path}`, 'Free some space and start again.');
 	if (error.code === 'EROFS') {
-		return new Trouble(`${path} cannot be written: the disk is read-only.`, 'Set DATA_DIR to a writable folder.');
+		return new Trouble(
+			`${path} cannot be written: the disk is read-only.`,
+			'Set DATA_DIR to a writable folder.'
+		);
 	}
 	return null;
 }

@@ -41,7 +41,7 @@ export function readSettings(env) {
 		databaseUrl,
 		databaseOwnerUrl: databaseOwnerUrl ?? databaseUrl,
 		demo: readSwitch(env, 'DEMO', databaseUrl === null),
-		secret: env['COGMARK_SECRET'] || null
+		secret: readSecret(env['COGMARK_SECRET'])
 	};
 }
 
@@ -57,7 +57,20 @@ function readPort(text) {
 	if (text === undefined || text === '') return 4280;
 	const port = Number(text);
 	if (/^\d+$/.test(text) && port >= 1 && port <= 65535) return port;
-	throw new Trouble(`PORT is "${text}".`, 'It must be a whole number from 1 to 65535, for example: PORT=4280 npm start');
+	throw new Trouble(
+		`PORT is "${text}".`,
+		'It must be a whole number from 1 to 65535, for example: PORT=4280 npm start'
+	);
+}
+
+/** @param {string | undefined} text */
+function readSecret(text) {
+	if (text === undefined || text === '') return null;
+	if (text.length >= 32) return text;
+	throw new Trouble(
+		`COGMARK_SECRET has only ${text.length} characters.`,
+		'Give at least 32 random ones, or leave it out: then one is made and kept in the data folder.'
+	);
 }
 
 /**

@@ -3,15 +3,29 @@
  * `{name}` is replaced by a value. A key ending in `#one` stands for the singular of the key before the mark.
  */
 import type { Language } from './language';
+import { checkPage } from './messages/check-page';
 import { common } from './messages/common';
 import { door } from './messages/door';
 import { gear } from './messages/gear';
+import { materials } from './messages/materials';
 import { office } from './messages/office';
 import { sync } from './messages/sync';
 import { tablet } from './messages/tablet';
 import { verdict } from './messages/verdict';
+import { working } from './messages/working';
 
-const catalogue = { ...common, ...door, ...gear, ...office, ...sync, ...tablet, ...verdict };
+const catalogue = {
+	...checkPage,
+	...common,
+	...door,
+	...gear,
+	...materials,
+	...office,
+	...sync,
+	...tablet,
+	...verdict,
+	...working
+};
 
 export type MessageKey = keyof typeof catalogue;
 export type Values = Record<string, string | number>;

@@ -37,8 +37,8 @@ export function answeredIn<const U extends readonly ReadingUnit[]>(units: U, val
 		typed,
 		value,
 		unit: z.enum(units, `The unit must be one of: ${units.join(', ')}.`),
-		/** Own keypad, a keyboard or calliper, or offered from what is known of the position and taken over. */
-		source: z.enum(['keypad', 'typed', 'position'], 'The source is keypad, typed or position.')
+		/** Own keypad, a keyboard or calliper, taken over from the position's record, or taken from a plant rule. */
+		source: z.enum(['keypad', 'typed', 'position', 'rule'], 'The source is keypad, typed, position or rule.')
 	});
 	return z.union([reading, cannotMeasure]).nullable();
 }
@@ -47,7 +47,7 @@ export interface Reading<U extends ReadingUnit = ReadingUnit> {
 	typed: string;
 	value: number;
 	unit: U;
-	source: 'keypad' | 'typed' | 'position';
+	source: 'keypad' | 'typed' | 'position' | 'rule';
 }
 export type AnsweredReading<U extends ReadingUnit = ReadingUnit> =
 	Reading<U> | { cannotMeasure: true } | null;

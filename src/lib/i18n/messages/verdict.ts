@@ -1,2 +1,47 @@
-/** Words of the verdict rooms. */
-export const verdict = {} as const satisfies Record<string, readonly [string, string]>;
+/** Words of verdicts and of the core's coded reasons. Never "safe", "approved" or "certified". */
+export const verdict = {
+	'verdict.carries': ['Carries the load', 'Soporta la carga'],
+	'verdict.close': ['Close: needs review', 'Justo: requiere revisión'],
+	'verdict.will-not-carry': ['Will not carry the load', 'No soporta la carga'],
+	'verdict.not-permitted': ['Material not permitted here', 'Material no permitido aquí'],
+	'verdict.cannot-say': ['Cannot say yet', 'Aún no se puede decir'],
+	'verdict.none': ['No check yet', 'Sin verificación'],
+	'verdict.say.carries': [
+		'Carries also at the bad end of the readings.',
+		'Soporta también en el extremo malo de las lecturas.'
+	],
+	'verdict.say.close': [
+		'The middle carries, the bad end does not.',
+		'El valor medio soporta, el extremo malo no.'
+	],
+	'verdict.say.will-not-carry': ['Bending of this gear decides.', 'Decide la flexión de este engrane.'],
+	'verdict.say.not-permitted': [
+		"{material} is not on the plant's list.",
+		'{material} no está en la lista de la planta.'
+	],
+	'verdict.margin': ['margin', 'margen'],
+	'verdict.low': ['low end', 'extremo bajo'],
+	'verdict.needs': ['needs', 'requiere'],
+	'verdict.needs-figure': ['needs {needed}', 'requiere {needed}'],
+	'verdict.plant-needs': ['plant needs', 'la planta requiere'],
+	'verdict.what-limits': ['What limits it', 'Qué lo limita'],
+	'verdict.bending-this': ['Bending, this gear', 'Flexión, este engrane'],
+	'verdict.by-speed': ['What it carries, by speed', 'Lo que soporta, según la velocidad'],
+	'verdict.beyond': ["beyond the plant's margin", 'fuera del margen de la planta'],
+	'verdict.this-drive': ['this drive, {power}', 'este accionamiento, {power}'],
+	'verdict.nothing-to-change': ['Nothing to change.', 'Nada que cambiar.'],
+	'verdict.carries-up-to': [
+		"At this speed it would carry up to {first} ({second}) with the plant's margin.",
+		'A esta velocidad soportaría hasta {first} ({second}) con el margen de la planta.'
+	],
+	'verdict.would-carry': ['It carries {first}', 'Soporta {first}'],
+	'verdict.would-carry-rest': [
+		"({second}) at this speed with the plant's margin. More than that needs another gear or review.",
+		'({second}) a esta velocidad con el margen de la planta. Más que eso exige otro engrane o revisión.'
+	],
+	'verdict.reason': ['Why', 'Por qué'],
+	'verdict.working': ['Working', 'Cálculo'],
+	'verdict.working-lines': ['line by line, {n} lines', 'línea por línea, {n} líneas'],
+	'verdict.hide-working': ['Hide the working', 'Ocultar el cálculo'],
+	'verdict.keep': ['Keep this check', 'Guardar esta verificación']
+} as const satisfies Record<string, readonly [string, string]>;

@@ -1,0 +1,20 @@
+/** The tooth forms of the handbook table, and when two pitches are the same gear under two names. */
+import { moduleOf } from '$lib/gear/pitch';
+import type { CheckAnswers } from '$lib/records/check';
+import type { ChosenPitch } from '$lib/records/mirror';
+
+type ToothFormChoice = {
+	pressureAngle: NonNullable<CheckAnswers['pressureAngle']>;
+	form: NonNullable<CheckAnswers['form']>;
+};
+
+export const TOOTH_FORMS: readonly ToothFormChoice[] = [
+	{ pressureAngle: 20, form: 'full-depth' },
+	{ pressureAngle: 14.5, form: 'full-depth' },
+	{ pressureAngle: 20, form: 'stub' }
+];
+
+/** DP 4 is module 6.35: one gear. */
+export function samePitch(a: ChosenPitch, b: ChosenPitch): boolean {
+	return Math.abs(moduleOf(a) / moduleOf(b) - 1) < 1e-9;
+}

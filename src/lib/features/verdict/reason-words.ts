@@ -1,0 +1,66 @@
+/**
+ * A coded reason of the core in the language of the page. A code that the catalogue does not hold yet is shown in
+ * the core's own English sentence, so that no reason is ever swallowed.
+ */
+import type { Outcome, Reason } from '$lib/gear/contract';
+import { fromSI } from '$lib/gear/quantity';
+import { isMessage, type Values } from '$lib/i18n/catalogue';
+import type { Words } from '$lib/i18n/context.svelte';
+import { figure, fixed, margin } from '$lib/i18n/format';
+
+/** Values that are codes themselves, and where their words stand. */
+const CODED: Record<string, string> = {
+	field: 'missing',
+	law: 'gear.law',
+	kind: 'gear.kind',
+	formFactor: 'form-rule'
+};
+
+export function reasonWords(reason: Reason, words: Words): string {
+	const key = `reason.${reason.code}`;
+	if (!isMessage(key)) return reason.text;
+	const values: Values = {};
+	for (const [name, value] of Object.entries(reason.values ?? {})) {
+		values[name] =
+			typeof value === 'number' ? numberWords(name, value, words) : codeWords(name, value, words);
+	}
+	return words.t(key, values);
+}
+
+function numberWords(name: string, value: number, { language }: Words): string {
+	switch (name) {
+		case 'margin':
+		case 'low':
+			return margin(value, language);
+		case 'needed':
+			return fixed(value, 2, language);
+		case 'gear':
+		case 'mate':
+			return fixed(value, 3, language);
+		case 'velocity':
+		case 'end':
+			return `${fixed(value, 2, language)} m/s (${fixed(fromSI(value, 'ft/min'), 0, language)} ft/min)`;
+		default:
+			return figure(value, 4, language);
+	}
+}
+
+function codeWords(name: string, value: string, { t }: Words): string {
+	const key = `${CODED[name]}.${value}`;
+	return isMessage(key) ? t(key) : value;
+}
+
+/** The one sentence under the verdict. Figures stand beside it already, so a margin is not told twice. */
+export function verdictSentence({ verdict, reasons }: Outcome, words: Words): string {
+	const [first] = reasons;
+	if (verdict === 'not-permitted') {
+		return words.t('verdict.say.not-permitted', { material: String(first?.values?.material ?? '') });
+	}
+	if (verdict === 'cannot-say') return first ? reasonWords(first, words) : '';
+	return words.t(`verdict.say.${verdict}`);
+}
+
+/** What stands below: every reason that the sentence and the figures do not tell. */
+export function otherReasons({ reasons }: Outcome): Reason[] {
+	return reasons.slice(1).filter(({ code }) => !code.startsWith('bending-margin'));
+}

@@ -1,0 +1,108 @@
+/**
+ * The Lewis form factor Y: how much of the load's force a tooth's shape turns into stress at its root, load at the
+ * tip. This part knows the handbook table: full depth at 14.5 and 20 degrees, stub at 20 degrees, no shift.
+ */
+import type { Reason, ToothForm } from './contract';
+import { SOURCES } from './sources';
+import {
+	FULL_DEPTH_14_5,
+	FULL_DEPTH_20,
+	LEWIS_TEETH,
+	STUB_20,
+	type LewisColumn
+} from './tables/faires-4th-edition';
+import { unrecorded, type Recorder } from './working';
+
+/** Fewest teeth in the table; below, the fillet is undercut and the method ends. */
+export const FEWEST_TEETH = 10;
+
+/** What the table is asked for. Angle in degrees, shift in modules. */
+export interface TableTooth {
+	teeth: number;
+	pressureAngle: number;
+	form: ToothForm;
+	profileShift?: number | undefined;
+}
+
+const line = {
+	symbol: 'Y',
+	name: 'Lewis form factor, load at the tip',
+	unit: '1',
+	source: SOURCES.lewisTable
+};
+
+/** Why the table cannot answer for this tooth; null when it can. */
+export function handbookRefusal({ teeth, pressureAngle, form, profileShift = 0 }: TableTooth): Reason | null {
+	if (profileShift !== 0) {
+		return {
+			code: 'profile-shift-not-covered',
+			text: `The handbook table holds teeth without profile shift, this gear has ${profileShift} x module. Check the shift, or have the gear rated by an engineer.`,
+			values: { profileShift }
+		};
+	}
+	if (!columnOf(pressureAngle, form)) {
+		return {
+			code: 'form-not-in-table',
+			text: `The handbook table holds full depth at 14.5 and 20 degrees and stub at 20 degrees, not ${formWords(form)} at ${pressureAngle} degrees. Check angle and form, or have the gear rated by an engineer.`,
+			values: { pressureAngle }
+		};
+	}
+	if (!(teeth >= FEWEST_TEETH)) {
+		return {
+			code: 'too-few-teeth',
+			text: `The Lewis method starts at ${FEWEST_TEETH} teeth, this gear has ${teeth}. Count again, or have the gear rated by an engineer.`,
+			values: { teeth, fewest: FEWEST_TEETH }
+		};
+	}
+	return null;
+}
+
+/**
+ * Lewis form factor Y (for diametral pitch or module), load at the tip, from the handbook table; between two
+ * entries linear in 1/N, the rack at 1/N = 0. Throws a RangeError with the sentence of `handbookRefusal` for a
+ * tooth that the table does not hold.
+ * Source: Faires, Design of Machine Elements, 4th ed., form-factor table (edition from memory).
+ * @example lewisFormFactor({ teeth: 24, pressureAngle: 14.5, form: 'full-depth' }) // 0.302
+ * @example lewisFormFactor({ teeth: 48, pressureAngle: 14.5, form: 'full-depth' }) // 0.34375
+ */
+export function lewisFormFactor(tooth: TableTooth, recorder: Recorder = unrecorded): number {
+	const column = columnOf(tooth.pressureAngle, tooth.form);
+	const refusal = handbookRefusal(tooth);
+	if (refusal || !column) throw new RangeError(refusal?.text);
+
+	const { below, above } = neighbours(column, tooth.teeth);
+	if (below.N === tooth.teeth) {
+		return recorder.step({ ...line, expression: 'table at N' }, { N: below.N }, () => below.Y);
+	}
+	return recorder.step(
+		{ ...line, expression: 'Ya + (Yb - Ya) · (1 / Na - 1 / N) / (1 / Na - 1 / Nb)' },
+		{ Ya: below.Y, Yb: above.Y, Na: below.N, Nb: above.N, N: tooth.teeth },
+		({ Ya, Yb, Na, Nb, N }) => Ya + ((Yb - Ya) * (1 / Na - 1 / N)) / (1 / Na - 1 / Nb)
+	);
+}
+
+/** Nobody reads an angle off a gear to a thousandth of a degree: this only forgives the arithmetic of a form. */
+const SAME_ANGLE = 1e-6;
+
+function columnOf(pressureAngle: number, form: ToothForm): LewisColumn | null {
+	const is = (angle: number) => Math.abs(pressureAngle - angle) < SAME_ANGLE;
+	if (form === 'full-depth') return is(20) ? FULL_DEPTH_20 : is(14.5) ? FULL_DEPTH_14_5 : null;
+	return form === 'stub' && is(20) ? STUB_20 : null;
+}
+
+interface Entry {
+	N: number;
+	Y: number;
+}
+
+/** The entries on either side of a tooth count; the last one's upper neighbour is the rack, at N = Infinity. */
+function neighbours({ Y, rack }: LewisColumn, teeth: number): { below: Entry; above: Entry } {
+	const next = LEWIS_TEETH.findIndex((N) => N > teeth);
+	const last = next === -1 ? LEWIS_TEETH.length - 1 : next - 1;
+	const entry = (i: number): Entry => ({ N: LEWIS_TEETH[i] ?? Infinity, Y: Y[i] ?? rack });
+	return { below: entry(last), above: entry(last + 1) };
+}
+
+function formWords(form: ToothForm): string {
+	return form === 'full-depth' ? 'full depth' : form === 'stub' ? 'stub' : 'a form given by its rack';
+}

@@ -1,0 +1,78 @@
+/** Words of a check's page in the office: readings as typed, drive and spare, working, and the record itself. */
+export const checkPage = {
+	'check-page.line': [
+		'Check of {performed}. {author}, {tablet}, record {number}.',
+		'Verificación del {performed}. {author}, {tablet}, registro {number}.'
+	],
+	'check-page.readings': ['Readings as typed', 'Lecturas como se escribieron'],
+	'check-page.readings-note': [
+		'nothing is converted before it is kept',
+		'nada se convierte antes de guardarse'
+	],
+	'check-page.drive': ['Drive and spare', 'Accionamiento y repuesto'],
+	'check-page.working': ['Working', 'Cálculo'],
+	'check-page.working-note': ["the server's own", 'el del servidor'],
+	'check-page.no-working': [
+		'There is no working: the reasons above say what is missing.',
+		'No hay cálculo: las razones de arriba dicen qué falta.'
+	],
+	'check-page.reasons': ['Why', 'Por qué'],
+	'check-page.record': ['The record', 'El registro'],
+	'check-page.number': ['Record', 'Registro'],
+	'check-page.number-of': ['{number} of {author} on {tablet}', '{number} de {author} en {tablet}'],
+	'check-page.made-by': ['Made by', 'Hecha por'],
+	'check-page.made': ['Made', 'Hecha'],
+	'check-page.received': ['Received', 'Recibida'],
+	'check-page.sent-by': ['Sent by', 'Enviada por'],
+	'check-page.clock': ["Tablet's clock", 'Reloj de la tableta'],
+	'check-page.clock-unknown': ['not compared', 'sin comparar'],
+	'check-page.clock-right': ['right within {n} s', 'correcto a {n} s'],
+	'check-page.clock-fast': ['{time} fast', '{time} adelantado'],
+	'check-page.clock-slow': ['{time} slow', '{time} atrasado'],
+	'check-page.place': ['Arrival number', 'Número de llegada'],
+	'check-page.hash': ['Fingerprint', 'Huella'],
+	'check-page.permit': ['Isolation permit', 'Permiso de bloqueo'],
+	'check-page.no-permit': ['none given', 'no se dio'],
+	'check-page.cautions': ['Cautions shown', 'Precauciones mostradas'],
+	'check-page.cautions-not': ['not confirmed', 'sin confirmar'],
+	'check-page.note': ['Note', 'Nota'],
+	'check-page.material': ['Material used', 'Material usado'],
+	'check-page.no-material': ['No material was chosen.', 'No se eligió material.'],
+	'check-page.revision': ['revision {n}', 'revisión {n}'],
+	'check-page.revision-in-force': ['in force now', 'vigente ahora'],
+	'check-page.revised-since': [
+		'Revised since: revision {n} is in force, {stress}. This check keeps the revision it was made with.',
+		'Revisado después: rige la revisión {n}, {stress}. Esta verificación conserva la revisión con que se hizo.'
+	],
+	'check-page.revised-permission': [
+		'The material is not permitted any more.',
+		'El material ya no está permitido.'
+	],
+	'check-page.rules': ["Plant's rules", 'Reglas de la planta'],
+	'check-page.rules-since': ['revision {n} is in force now', 'ahora rige la revisión {n}'],
+	'check-page.amends': ['This record corrects an earlier one.', 'Este registro corrige uno anterior.'],
+	'check-page.amends-open': ['Open the earlier one', 'Abrir el anterior'],
+	'check-page.amended': ['A later record corrects this one.', 'Un registro posterior corrige este.'],
+	'check-page.amended-open': ['Open the later one', 'Abrir el posterior'],
+	'check-page.print': ['Print', 'Imprimir'],
+	'check-page.all-of-machine': ['Machine', 'Máquina'],
+	'check-page.column.reading': ['Reading', 'Lectura'],
+	'check-page.column.typed': ['As typed', 'Como se escribió'],
+	'check-page.column.other': ['Other unit', 'Otra unidad'],
+	'check-page.column.source': ['From', 'Origen'],
+	'check-page.not-given': ['not given', 'no se dio'],
+	'check-page.cannot-measure': ['cannot measure', 'no se puede medir'],
+	'check-page.load-unknown': ['not known', 'no se conoce'],
+	'check-page.one-way': ['loaded on one flank', 'carga en un flanco'],
+	'check-page.loading': ['Loading', 'Sentido de carga'],
+	'check-page.from.keypad': ['keypad', 'teclado de pantalla'],
+	'check-page.from.typed': ['keyboard or calliper', 'teclado o calibrador'],
+	'check-page.from.position': ['from the record', 'del registro'],
+	'check-page.from.rule': ['plant rule', 'regla de la planta'],
+	'check-page.from.hand': ['chosen by hand', 'elegido a mano'],
+	'check-page.from.list': ["plant's list", 'lista de la planta'],
+	'caution.page.lead': [
+		'A screening of tooth strength from the readings shown.',
+		'Un examen de la resistencia del diente con las lecturas mostradas.'
+	]
+} as const satisfies Record<string, readonly [string, string]>;

@@ -1,0 +1,193 @@
+/**
+ * What must hold for every check, whatever the numbers: scaling laws, the same answer in both unit systems, the order
+ * of margins, the verdict's agreement with them, and never a figure that is no number.
+ */
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import type { EvaluateInput, Outcome } from '$lib/gear/contract';
+import { permittedPowerAt } from '$lib/gear/capacity';
+import { evaluate } from '$lib/gear/evaluate';
+import { fromSI, toSI, type Unit } from '$lib/gear/quantity';
+import { parseEvaluate } from '$lib/records/evaluate';
+import { allowed, realistic } from './check-arbitrary';
+
+const RUNS = { numRuns: 1000 };
+const of = (value: number | null) => value ?? NaN;
+
+function expectSame(a: number, b: number, tolerance = 1e-9): void {
+	expect(Math.abs(a / b - 1), `${a} and ${b}`).toBeLessThanOrEqual(tolerance);
+}
+
+/** Checks that come to a margin; the others are covered by the properties over `allowed`. */
+const withMargin = realistic.filter((input) => evaluate(input).bendingMargin !== null);
+
+test('most realistic checks come to a margin', () => {
+	const sample = fc.sample(realistic, { numRuns: 300, seed: 7 });
+	const answered = sample.filter((input) => evaluate(input).bendingMargin !== null);
+	expect(answered.length).toBeGreaterThan(150);
+});
+
+describe('scaling', () => {
+	test('stress rises with the service factor and falls with the face width, in proportion', () => {
+		fc.assert(
+			fc.property(withMargin, fc.double({ min: 0.5, max: 2, noNaN: true }), (input, k) => {
+				const before = of(evaluate(input).bendingStress);
+				const { gear, drive } = input;
+				const harder = { ...input, drive: { ...drive, serviceFactor: drive.serviceFactor * k } };
+				expectSame(of(evaluate(harder).bendingStress), before * k);
+				const wider = { ...input, mate: undefined, gear: { ...gear, faceWidth: times(gear.faceWidth, k) } };
+				const alone = of(evaluate({ ...input, mate: undefined }).bendingStress);
+				expectSame(of(evaluate(wider).bendingStress), alone / k);
+			}),
+			RUNS
+		);
+	});
+
+	test('stress rises with the load in proportion', () => {
+		fc.assert(
+			fc.property(withMargin, fc.double({ min: 0.5, max: 2, noNaN: true }), (input, k) => {
+				expectSame(of(evaluate(loaded(input, k)).bendingStress), of(evaluate(input).bendingStress) * k);
+			}),
+			RUNS
+		);
+	});
+
+	test('a gear under its permitted power has the needed margin', () => {
+		fc.assert(
+			fc.property(withMargin, (input) => {
+				const { permittedPower, permittedTorque } = evaluate(input);
+				const needed = input.rules?.bendingMargin ?? 1;
+				const power = { power: { value: of(permittedPower), unit: 'W' as const } };
+				const torque = { torque: { value: of(permittedTorque), unit: 'N*m' as const } };
+				for (const load of [power, torque]) {
+					const outcome = evaluate({ ...input, drive: { ...input.drive, load } });
+					expectSame(of(outcome.bendingMargin), needed);
+					expect(outcome.verdict).not.toBe('will-not-carry');
+				}
+			}),
+			RUNS
+		);
+	});
+});
+
+test('a check stated in inches, horsepower and pounds gives the same outcome as in SI units', () => {
+	fc.assert(
+		fc.property(withMargin, (input) => {
+			const [si, us] = [evaluate(input), evaluate(inInches(input))];
+			for (const name of Object.keys(si) as (keyof Outcome)[]) {
+				const [a, b] = [si[name], us[name]];
+				if (typeof a === 'number' && a !== 0) expectSame(a, b as number);
+			}
+			expect(us.verdict).toBe(si.verdict);
+		}),
+		RUNS
+	);
+});
+
+describe('whatever the schema lets through', () => {
+	test('is answered in finite figures, the low margin never above the margin', () => {
+		fc.assert(
+			fc.property(fc.oneof(allowed, realistic), (input) => {
+				const parsed = parseEvaluate(input);
+				if (!parsed.ok) throw new Error(JSON.stringify(parsed.error));
+				const outcome = evaluate(parsed.input);
+				expectFinite(outcome);
+				expect(outcome.reasons.length).toBeGreaterThan(0);
+				if (outcome.bendingMargin !== null) {
+					expect(outcome.bendingMarginLow).toBeLessThanOrEqual(outcome.bendingMargin);
+				}
+				expectVerdictFits(outcome, parsed.input);
+			}),
+			RUNS
+		);
+	});
+
+	test('has a curve that agrees with the permitted power at its own speed', () => {
+		fc.assert(
+			fc.property(withMargin, (input) => {
+				const outcome = evaluate(input);
+				const at = permittedPowerAt(input, input.drive.speed?.value ?? NaN);
+				expect(at?.middle).toBe(outcome.permittedPower);
+				const low = of(outcome.bendingMarginLow) / of(outcome.bendingMargin);
+				expect(of(at?.low ?? null)).toBeCloseTo(low * of(outcome.permittedPower), 6);
+			}),
+			RUNS
+		);
+	});
+});
+
+test('a field overwritten with rubbish is refused, or answered without a number that is none', () => {
+	const rubbish = fc.constantFrom<unknown>(
+		...[1e308, -1e308, 5e-324, NaN, Infinity, 0, -1, 'x', '', null, [], {}, true, undefined]
+	);
+	// prettier-ignore
+	const place = fc.constantFrom(
+		'gear', 'gear.teeth', 'gear.pitch', 'gear.pitch.value', 'gear.faceWidth', 'gear.faceWidth.value',
+		'gear.faceWidth.unit', 'gear.pressureAngle', 'gear.form', 'gear.finish', 'gear.kind', 'gear.material',
+		'gear.material.allowableBending.value', 'drive', 'drive.load', 'drive.speed', 'drive.speed.value',
+		'drive.serviceFactor', 'mate', 'rules', 'uncertainty'
+	);
+	fc.assert(
+		fc.property(realistic, place, rubbish, (input, path, value) => {
+			const parsed = parseEvaluate(replaced(input, path, value));
+			if (parsed.ok) return expectFinite(evaluate(parsed.input));
+			expect(parsed.error.error.issues.length).toBeGreaterThan(0);
+			for (const issue of parsed.error.error.issues) {
+				expect(issue.path === path || issue.path.startsWith(`${path}.`) || path.startsWith(issue.path)).toBe(
+					true
+				);
+				expect(issue.message).toMatch(/\b(must|known|leave)\b/);
+			}
+		}),
+		RUNS
+	);
+});
+
+function expectVerdictFits(
+	{ verdict, bendingMargin, bendingMarginLow }: Outcome,
+	input: EvaluateInput
+): void {
+	const needed = (input.rules?.bendingMargin ?? 1) * (1 - 1e-9);
+	if (!input.gear.material.permitted) return expect(verdict).toBe('not-permitted');
+	if (verdict === 'cannot-say') return;
+	expect(verdict).toBe(
+		of(bendingMargin) < needed ? 'will-not-carry' : of(bendingMarginLow) < needed ? 'close' : 'carries'
+	);
+}
+
+function expectFinite(value: unknown): void {
+	if (typeof value === 'number') return expect(Number.isFinite(value)).toBe(true);
+	if (typeof value === 'object' && value !== null) Object.values(value).forEach(expectFinite);
+}
+
+function times<Q extends { value: number }>(quantity: Q, k: number): Q {
+	return { ...quantity, value: quantity.value * k };
+}
+
+function loaded(input: EvaluateInput, k: number): EvaluateInput {
+	const { load } = input.drive;
+	if (load === 'unknown') return input;
+	const more = Object.fromEntries(Object.entries(load).map(([kind, quantity]) => [kind, times(quantity, k)]));
+	return { ...input, drive: { ...input.drive, load: more as typeof load } };
+}
+
+function inInches(input: EvaluateInput): EvaluateInput {
+	const US: Partial<Record<Unit, Unit>> = { mm: 'in', kW: 'hp', 'N*m': 'lbf*ft', N: 'lbf', MPa: 'psi' };
+	return JSON.parse(JSON.stringify(input), (_key, value: unknown) => {
+		if (typeof value !== 'object' || value === null) return value;
+		if ('system' in value && value.system === 'module' && 'value' in value) {
+			return { system: 'diametral', value: 25.4 / Number(value.value) };
+		}
+		if (!('unit' in value && 'value' in value)) return value;
+		const unit = US[value.unit as Unit];
+		const typed = { value: Number(value.value), unit: value.unit as Unit };
+		return unit ? { value: fromSI(toSI(typed), unit), unit } : value;
+	}) as EvaluateInput;
+}
+
+function replaced(input: unknown, path: string, value: unknown): unknown {
+	const [key = '', ...rest] = path.split('.');
+	if (typeof input !== 'object' || input === null) return input;
+	const inner = (input as Record<string, unknown>)[key];
+	return { ...input, [key]: rest.length === 0 ? value : replaced(inner, rest.join('.'), value) };
+}

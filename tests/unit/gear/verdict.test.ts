@@ -1,0 +1,198 @@
+/**
+ * The verdict of every kind of check: what carries, what is close, what falls short, what is not permitted here, and
+ * what cannot be said. Each has a coded reason, and what cannot be said says what to do.
+ */
+import { describe, expect, test } from 'vitest';
+import type { EvaluateInput, Gear, Mate, Rules } from '$lib/gear/contract';
+import { evaluate } from '$lib/gear/evaluate';
+import { CORE_VERSION } from '$lib/gear/version';
+import { spurCheck } from '../../reference/spur-check';
+
+const base = spurCheck({ teeth: 24, pitch: { system: 'diametral', value: 6 }, rpm: 400 });
+const withGear = (change: Partial<Gear>): EvaluateInput => ({ ...base, gear: { ...base.gear, ...change } });
+const withDrive = (change: Partial<EvaluateInput['drive']>): EvaluateInput => ({
+	...base,
+	drive: { ...base.drive, ...change }
+});
+const withRules = (rules: Partial<Rules>): EvaluateInput => ({ ...base, rules });
+const withMate = (mate: Mate): EvaluateInput => ({ ...base, mate });
+
+/** A drive that leaves exactly this margin. */
+function atMargin(margin: number, rules: Partial<Rules> = {}): EvaluateInput {
+	const { bendingMargin } = evaluate(base);
+	const serviceFactor = (base.drive.serviceFactor * (bendingMargin ?? NaN)) / margin;
+	return { ...withDrive({ serviceFactor }), rules };
+}
+
+describe('by margin', () => {
+	test.each([
+		{ margin: 3, needed: 1.5, verdict: 'carries', code: 'bending-margin' },
+		{ margin: 1.6, needed: 1.5, verdict: 'close', code: 'bending-margin-low' },
+		{ margin: 1.5, needed: 1.5, verdict: 'close', code: 'bending-margin-low' },
+		{ margin: 1.499, needed: 1.5, verdict: 'will-not-carry', code: 'bending-margin-short' }
+	])('$margin where $needed is needed: $verdict', ({ margin, needed, verdict, code }) => {
+		const outcome = evaluate(atMargin(margin, { bendingMargin: needed }));
+		expect(outcome.verdict).toBe(verdict);
+		expect(outcome.core).toBe(CORE_VERSION);
+		const [reason] = outcome.reasons;
+		expect(reason).toMatchObject({ code, values: { needed } });
+		expect(reason?.values?.margin).toBeCloseTo(margin, 9);
+		expect(reason?.values?.low).toBe(outcome.bendingMarginLow);
+		expect(reason?.text).toContain(String(needed));
+	});
+
+	test('a margin a little short never reads as the needed one', () => {
+		expect(evaluate(atMargin(0.9999)).reasons[0]?.text).toContain('0.99,');
+	});
+
+	test('carries and close say what this version leaves out', () => {
+		expect(evaluate(atMargin(3)).reasons.map(({ code }) => code)).toEqual(['bending-margin', 'bending-only']);
+	});
+
+	test('exact readings make close impossible', () => {
+		const exact = { ...atMargin(1), uncertainty: { faceWidth: 0, load: 0, speed: 0 } };
+		expect(evaluate(exact)).toMatchObject({ verdict: 'carries' });
+	});
+});
+
+describe('what the figures follow', () => {
+	test('reversing multiplies the allowable by the factor of the rules', () => {
+		const outcome = evaluate({ ...withDrive({ bending: 'reversing' }), rules: { reversingFactor: 0.6 } });
+		expect(outcome.allowableBending).toBeCloseTo(0.6 * 150, 12);
+		expect(evaluate(withDrive({ bending: 'reversing' })).allowableBending).toBeCloseTo(0.7 * 150, 12);
+		expect(evaluate(base).allowableBending).toBe(150);
+	});
+
+	test('a narrower mate sets the face width, a wider one does not', () => {
+		const margin = (value: number) =>
+			evaluate(withMate({ kind: 'spur', faceWidth: { value, unit: 'mm' } })).bendingMargin ?? NaN;
+		const alone = evaluate(base).bendingMargin ?? NaN;
+		expect(margin(12.5)).toBeCloseTo(alone / 2, 9);
+		expect(margin(60)).toBe(alone);
+	});
+
+	test('the law is named, by finish, by the rule for cut teeth and for non-metallic gears', () => {
+		expect(evaluate(base).velocityLaw).toBe('cut');
+		expect(evaluate(withRules({ cutLaw: 600 })).velocityLaw).toBe('cut-600');
+		expect(evaluate(withGear({ finish: 'ground' })).velocityLaw).toBe('ground');
+		const phenolic = { ...base.gear.material, metallic: false };
+		expect(evaluate(withGear({ material: phenolic })).velocityLaw).toBe('non-metallic');
+	});
+});
+
+describe('material not permitted', () => {
+	const material = { ...base.gear.material, name: 'Iron 17', permitted: false };
+
+	test('comes before the margin, which is still worked out', () => {
+		const outcome = evaluate(withGear({ material }));
+		expect(outcome.verdict).toBe('not-permitted');
+		expect(outcome.reasons.map(({ code }) => code).slice(0, 2)).toEqual([
+			'material-not-permitted',
+			'bending-margin'
+		]);
+		expect(outcome.reasons[0]?.text).toContain('Iron 17');
+		expect(outcome.bendingMargin).toBe(evaluate(base).bendingMargin);
+	});
+
+	test('comes before what cannot be said', () => {
+		const outcome = evaluate(withGear({ material, teeth: 8 }));
+		expect(outcome.verdict).toBe('not-permitted');
+		expect(outcome.reasons.map(({ code }) => code)).toEqual(['material-not-permitted', 'too-few-teeth']);
+	});
+});
+
+describe('cannot say', () => {
+	const rack = { addendum: 1, dedendum: 1.25, tipRadius: 0.3 };
+	const refused: [code: string, input: EvaluateInput][] = [
+		['kind-not-covered', withGear({ kind: 'helical', helixAngle: 15 })],
+		['kind-not-covered', withGear({ kind: 'internal' })],
+		['kind-not-covered', { ...withGear({ kind: 'rack', teeth: undefined }) }],
+		['kind-not-covered', withGear({ helixAngle: 10 })],
+		['form-rule-not-covered', withRules({ formFactor: 'geometry' })],
+		['form-rule-not-covered', withRules({ formFactor: 'lower-of-both' })],
+		['profile-shift-not-covered', withGear({ profileShift: 0.3 })],
+		['form-not-in-table', withGear({ pressureAngle: 25 })],
+		['form-not-in-table', withGear({ pressureAngle: 14.5, form: 'stub' })],
+		['form-not-in-table', withGear({ form: rack })],
+		['too-few-teeth', withGear({ teeth: 9 })],
+		['teeth-missing', withGear({ teeth: undefined })],
+		['speed-missing', withDrive({ speed: undefined })],
+		['load-unknown', withDrive({ load: 'unknown' })],
+		['speed-beyond-law', withDrive({ speed: { value: 4000, unit: 'rpm' } })],
+		['speed-beyond-law', withDrive({ speed: { value: -1, unit: 'rpm' } })],
+		['mate-pitch-differs', withMate({ kind: 'spur', pitch: { system: 'module', value: 4 } })],
+		['mate-pitch-differs', withMate({ kind: 'spur', pitch: base.gear.pitch, pressureAngle: 14.5 })],
+		['out-of-range', withDrive({ load: { power: { value: 1e308, unit: 'hp' } } })],
+		['out-of-range', withGear({ faceWidth: { value: 1e-320, unit: 'mm' } })]
+	];
+
+	test.each(refused)('%s', (code, input) => {
+		const outcome = evaluate(input);
+		expect(outcome.verdict).toBe('cannot-say');
+		expect(outcome.reasons.map((reason) => reason.code)).toContain(code);
+		const reason = outcome.reasons.find((candidate) => candidate.code === code);
+		expect(reason?.text).toMatch(/\b(Check|Give|Count|Have|have|can set)\b/);
+		expect(JSON.stringify(outcome)).not.toContain('NaN');
+	});
+
+	test('a mate of the same pitch, said in another way, is no obstacle', () => {
+		const outcome = evaluate(withMate({ kind: 'spur', pitch: { system: 'module', value: 4.2333 } }));
+		expect(outcome.verdict).toBe('carries');
+	});
+
+	test('what the missing piece does not touch is still worked out', () => {
+		const outcome = evaluate(withDrive({ load: 'unknown' }));
+		expect(outcome).toMatchObject({
+			pitchDiameter: 101.6,
+			formFactor: 0.337,
+			bendingStress: null,
+			bendingMargin: null
+		});
+		expect(outcome.permittedPower).toBe(evaluate(base).permittedPower);
+		const tooFast = evaluate(withDrive({ speed: { value: 4000, unit: 'rpm' } }));
+		expect(tooFast.pitchLineVelocity).toBeGreaterThan(20);
+		expect(tooFast).toMatchObject({ velocityFactor: null, bendingMargin: null, permittedPower: null });
+	});
+});
+
+describe('end of a velocity law', () => {
+	// Usual ends in ft/min: Faires, Doughtie & Vallance (from memory); ground and non-metallic are common practice.
+	test.each([
+		{ finish: 'cast', cutLaw: 1200, metallic: true, end: 1000 },
+		{ finish: 'cut', cutLaw: 1200, metallic: true, end: 4000 },
+		{ finish: 'cut', cutLaw: 600, metallic: true, end: 2000 },
+		{ finish: 'hobbed', cutLaw: 1200, metallic: true, end: 4000 },
+		{ finish: 'ground', cutLaw: 1200, metallic: true, end: 10000 },
+		{ finish: 'cut', cutLaw: 1200, metallic: false, end: 6000 }
+	] as const)(
+		'$finish, cut law $cutLaw, metallic $metallic: $end ft/min',
+		({ finish, cutLaw, metallic, end }) => {
+			const at = (feetPerMinute: number): EvaluateInput => ({
+				...withGear({ finish, material: { ...base.gear.material, metallic } }),
+				drive: { ...base.drive, speed: { value: (feetPerMinute * 12) / (Math.PI * 4), unit: 'rpm' } },
+				rules: { cutLaw }
+			});
+			expect(evaluate(at(end)).bendingMargin).not.toBeNull();
+			expect(evaluate(at(end * 1.001)).reasons.map(({ code }) => code)).toEqual(['speed-beyond-law']);
+		}
+	);
+
+	test.each([
+		{ limit: 2, carries: false },
+		{ limit: 30, carries: true }
+	])("the plant's own limit of $limit m/s counts instead", ({ limit, carries }) => {
+		const speedLimit = {
+			cast: null,
+			cut: { value: limit, unit: 'm/s' as const },
+			hobbed: null,
+			ground: null
+		};
+		const input = {
+			...withDrive({ speed: { value: carries ? 4000 : 400, unit: 'rpm' } }),
+			rules: { speedLimit }
+		};
+		const outcome = evaluate(input);
+		expect(outcome.bendingMargin !== null).toBe(carries);
+		if (!carries) expect(outcome.reasons[0]?.text).toContain('the plant allows for cut or milled teeth');
+	});
+});
