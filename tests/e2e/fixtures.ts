@@ -16,7 +16,7 @@ export const PEOPLE = {
 
 interface Worker {
 	server: Server;
-	/** The owner's connection, to look at rows as they are; it sees every plant. */
+	/** The owner's connection, to look at rows as they are, one plant at a time: see `lookAt`. */
 	sql: postgres.Sql;
 }
 
@@ -42,6 +42,12 @@ export const test = base.extend<object, Worker>({
 	],
 	baseURL: async ({ server }, use) => use(server.origin)
 });
+
+/** The owner too sees no plant's rows before naming the plant. */
+export async function lookAt(sql: postgres.Sql, plant: string): Promise<void> {
+	const [row] = await sql`select id from plants where name = ${plant}`;
+	await sql`select set_config('app.plant', ${row!.id}, false)`;
+}
 
 export async function signIn(page: Page, who: keyof typeof PEOPLE, next = ''): Promise<void> {
 	await page.goto(`/sign-in${next ? `?next=${next}` : ''}`);

@@ -1,5 +1,5 @@
 /** The whole way, in small: a measured gear on a tablet without a server, to the planner's page. */
-import { expect, readyTablet, signIn, tapKeys, test } from './fixtures';
+import { expect, lookAt, readyTablet, signIn, tapKeys, test } from './fixtures';
 import { doCheck } from './steps';
 
 test.afterEach(async ({ server }) => {
@@ -15,6 +15,7 @@ test('a check is done with the server stopped, survives a killed page, and reach
 	server,
 	sql
 }) => {
+	await lookAt(sql, 'Ashgrove Board Mill');
 	await readyTablet(page, 'millwright');
 	await page.getByRole('link', { name: /A-117/ }).tap();
 	await page.waitForURL('**/tablet/machine/*');
@@ -57,13 +58,13 @@ test('a check is done with the server stopped, survives a killed page, and reach
 	await Promise.race([session.send('Page.crash').catch(() => null), page.waitForEvent('crash')]);
 	const again = await context.newPage();
 	await again.goto(`${server.origin}/tablet/kept`);
-	await expect(again.getByText('Kept on this tablet. Waiting to send')).toBeVisible();
-	await expect(again.getByText('Waiting to send (1)')).toBeVisible();
+	await expect(again.getByRole('listitem').getByText('Kept on this tablet. Waiting to send')).toHaveCount(1);
+	await expect(again.getByRole('main').getByText('Waiting to send (1)')).toBeVisible();
 
 	await server.start();
 	await again.getByRole('button', { name: 'Send now' }).tap();
-	await expect(again.getByText(/Received by the plant \d\d:\d\d/)).toBeVisible();
-	await expect(again.getByText('Nothing waits to be sent')).toBeVisible();
+	await expect(again.getByRole('listitem').getByText(/Received by the plant \d\d:\d\d/)).toBeVisible();
+	await expect(again.getByRole('main').getByText('Nothing waits to be sent')).toBeVisible();
 
 	const rows =
 		await sql`select id, agrees, envelope, server_outcome, tablet_outcome from checks where id = ${id}`;
@@ -170,6 +171,9 @@ test('bad input on the keypad names field and remedy and keeps what was typed', 
 	await expect(page.getByText(/two points/)).toBeVisible();
 	await page.locator('.box input').fill('136.9 mm');
 	await page.keyboard.press('Enter');
-	// Millimetres typed into a field in inches are impossible there, and said so with the limit.
-	await expect(page.getByText(/Outside diameter|Face width/).first()).toBeVisible();
+	// Its unit counts: 136.9 mm are kept as typed, not as inches.
+	await expect(page.getByRole('heading', { name: 'Face width' })).toBeVisible();
+	await page.goto(page.url().replace(/\?.*/, '?reading=outsideDiameter'));
+	await expect(page.locator('.box input')).toHaveValue('136.9 mm');
+	await expect(page.getByText('5.3898 in')).toBeVisible();
 });

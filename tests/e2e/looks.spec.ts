@@ -1,7 +1,7 @@
 /** Every screen of this version under axe, in both orientations, themes and languages; pictures for looking at. */
 import AxeBuilder from '@axe-core/playwright';
 import type { Page } from '@playwright/test';
-import { expect, readyTablet, signIn, test } from './fixtures';
+import { expect, lookAt, readyTablet, signIn, test } from './fixtures';
 import { doCheck } from './steps';
 
 async function isClean(page: Page): Promise<void> {
@@ -105,14 +105,12 @@ test('the tablet, every step', async ({ page }) => {
 test('the office, every page', async ({ page, sql }) => {
 	test.setTimeout(300_000);
 	await page.setViewportSize({ width: 1440, height: 900 });
+	await lookAt(sql, 'Ashgrove Board Mill');
 	await signIn(page, 'supervisor');
 	const [check] = await sql`
-		select c.id from checks c join plants p on p.id = c.plant_id
-		where p.name like 'Ashgrove%' and c.server_outcome->>'verdict' = 'will-not-carry' order by seq desc limit 1`;
-	const [machine] = await sql`
-		select m.id from machines m join plants p on p.id = m.plant_id where p.name like 'Ashgrove%' and m.tag = 'A-117'`;
-	const [material] = await sql`
-		select m.id from materials m join plants p on p.id = m.plant_id where p.name like 'Ashgrove%' limit 1`;
+		select id from checks where server_outcome->>'verdict' = 'will-not-carry' order by seq desc limit 1`;
+	const [machine] = await sql`select id from machines where tag = 'A-117'`;
+	const [material] = await sql`select id from materials limit 1`;
 	for (const [name, path] of [
 		['machines', '/machines'],
 		['machines-none', '/machines?find=nothing-like-this'],

@@ -1,5 +1,5 @@
 /** The supervisor's list decides on the tablet: a material that loses its permission is refused after the next pull. */
-import { expect, readyTablet, signIn, test } from './fixtures';
+import { expect, lookAt, readyTablet, signIn, test } from './fixtures';
 import { doCheck } from './steps';
 
 test('a withdrawn material gives "not permitted" on the tablet after the next pull, and old records keep theirs', async ({
@@ -8,6 +8,7 @@ test('a withdrawn material gives "not permitted" on the tablet after the next pu
 	server,
 	sql
 }) => {
+	await lookAt(sql, 'Kettle Hollow Lime Works');
 	await readyTablet(page, 'metricMillwright');
 
 	const office = await browser.newContext({
@@ -35,15 +36,7 @@ test('a withdrawn material gives "not permitted" on the tablet after the next pu
 	);
 
 	await supervisor.locator('input[name=source]').fill('plant test report 12');
-	await supervisor
-		.locator('[name=permitted][value=no], input[type=checkbox][name=permitted]')
-		.first()
-		.setChecked(
-			await supervisor
-				.locator('[name=permitted][value=no]')
-				.count()
-				.then((n) => n > 0)
-		);
+	await supervisor.locator('input[name=permitted][value=no]').check();
 	await supervisor.locator('form:has(input[name=source]) button[type=submit]').click();
 	await expect
 		.poll(

@@ -223,7 +223,11 @@ describe('refusing', () => {
 		expect(await keptChecks(plant)).toHaveLength(2);
 		await expectGapless(plant);
 
-		await storeRecords(plant.scope.millwright, pushOf(tablet, records));
+		// Sent again, each is answered as before: only what was stored is now a duplicate.
+		const again = await storeRecords(plant.scope.millwright, pushOf(tablet, records));
+		expect(statuses(again.answers)).toEqual(
+			sent.map(([status]) => (status === 'stored' ? 'duplicate' : status))
+		);
 		expect(await asideOf(plant)).toHaveLength(aside.length);
 		expect(await firstBrokenAudit(plant.scope.supervisor)).toBeNull();
 	});

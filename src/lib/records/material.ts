@@ -2,16 +2,22 @@
  * A material of the plant's list, in one revision. The form that makes a revision, the row that keeps it and
  * the mirror on the tablet use this one schema. A value without a source is refused.
  */
+import { STRESS_UNITS, toSI } from '$lib/gear/quantity';
 import { z } from 'zod';
 
+/** No gear material is stiffer or stronger than this, in MPa: diamond's modulus is about 1,200 GPa. */
+export const MOST_STRESS_MPA = 2e6;
+
 const stress = (what: string) =>
-	z.strictObject({
-		value: z
-			.number(`${what}: type a number.`)
-			.positive(`${what} must be greater than zero.`)
-			.max(1e7, `${what} is beyond any gear material: check the unit.`),
-		unit: z.enum(['MPa', 'GPa', 'psi', 'ksi'], `${what}: choose MPa, GPa, psi or ksi.`)
-	});
+	z
+		.strictObject({
+			value: z.number(`${what}: type a number.`).positive(`${what} must be greater than zero.`),
+			unit: z.enum(STRESS_UNITS, `${what}: choose MPa, GPa, psi or ksi.`)
+		})
+		.refine((quantity) => toSI(quantity) <= MOST_STRESS_MPA, {
+			path: ['value'],
+			message: `${what} is beyond any gear material: check the unit.`
+		});
 
 const words = (what: string, most: number) =>
 	z

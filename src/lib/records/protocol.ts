@@ -13,9 +13,19 @@ export const PULL_PAGE = 500;
 export const pushRequest = z.strictObject({
 	tabletId: uuid,
 	/** The highest number drawn per author on this tablet for this plant; sent with every ping. */
-	drawn: z.array(z.strictObject({ authorId: uuid, highest: z.number().int().nonnegative() })).max(200),
+	drawn: z
+		.array(
+			z.strictObject({
+				authorId: uuid,
+				highest: z.number('The highest number drawn: a whole number from 0.').int().nonnegative()
+			}),
+			'drawn: send a list of {authorId, highest}; an empty list where none was drawn.'
+		)
+		.max(200, 'drawn: at most 200 authors.'),
 	/** Checked one by one, so that a bad record delays no other. An empty list is a ping. */
-	records: z.array(z.unknown()).max(PUSH_MAX_RECORDS, `At most ${PUSH_MAX_RECORDS} records at once.`)
+	records: z
+		.array(z.unknown(), 'records: send a list; an empty one is a ping.')
+		.max(PUSH_MAX_RECORDS, `At most ${PUSH_MAX_RECORDS} records at once.`)
 });
 export type PushRequest = z.infer<typeof pushRequest>;
 

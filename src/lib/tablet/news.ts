@@ -1,6 +1,6 @@
 /** Tells the screens of this tab and of every other tab of the tablet what changed in the store; no content. */
 
-export type News = 'drafts' | 'records' | 'mirror' | 'person' | 'settings';
+export type News = 'drafts' | 'records' | 'mirror' | 'person';
 
 export interface NewsBoard {
 	tell(about: News): void;

@@ -13,7 +13,6 @@ import { DATABASE, openStore, type StoreTrouble } from './store/open';
 import { listRecords, readRecord, type KeptRecord } from './store/outbox';
 import { readPerson, setPerson, signOut } from './store/person';
 import type { Draft, LocalPerson } from './store/schema';
-import { changeSettings, readSettings, type Settings } from './store/settings';
 import { syncPort } from './store/sync-port';
 import { tabletId } from './store/tablet-id';
 import { createSync, type Sync } from './sync/engine';
@@ -25,7 +24,6 @@ export type { News } from './news';
 export { KeepFailure, type CheckToKeep } from './store/keep';
 export type { KeptRecord, RecordStatus } from './store/outbox';
 export type { Draft, LocalPerson } from './store/schema';
-export type { Settings } from './store/settings';
 export type { Sync } from './sync/engine';
 export type { SyncStatus } from './sync/status';
 export type { WhoAmI } from './who-am-i';
@@ -52,8 +50,6 @@ export interface Tablet {
 	signOut(): Promise<void>;
 	/** Asks the server, and lets whoever is signed in there work here. */
 	whoAmI(): Promise<WhoAmI>;
-	settings(): Promise<Settings>;
-	setSettings(change: Partial<Settings>): Promise<Settings>;
 	drafts: {
 		start(start: drafts.DraftStart): Promise<Draft>;
 		/** To be called at every keystroke. */
@@ -163,8 +159,6 @@ export async function startTablet(
 			}
 			return answer;
 		},
-		settings: () => readSettings(store),
-		setSettings: (change) => told('settings', changeSettings(store, change)),
 		drafts: {
 			start: (start) => told('drafts', drafts.startDraft(store, start, now())),
 			save: (draft) => drafts.saveDraft(store, draft, now()),

@@ -98,7 +98,11 @@ describe('a reason in words', () => {
 	});
 
 	it('says a velocity in both units and the law in words', () => {
-		const reason = { code: 'speed-beyond-law', text: 'unused', values: { velocity: 12, end: 10.16, law: 'cut-600' } };
+		const reason = {
+			code: 'speed-beyond-law',
+			text: 'unused',
+			values: { velocity: 12, end: 10.16, law: 'cut-600' }
+		};
 		expect(reasonWords(reason, english)).toContain('12.00 m/s (2,362 ft/min)');
 		expect(reasonWords(reason, spanish)).toContain('dientes cortados comerciales');
 	});
@@ -109,7 +113,9 @@ describe('a reason in words', () => {
 	});
 
 	it('falls back to the sentence of the core for a code of a later version', () => {
-		expect(reasonWords({ code: 'of-a-later-core', text: 'As the core says it.' }, spanish)).toBe('As the core says it.');
+		expect(reasonWords({ code: 'of-a-later-core', text: 'As the core says it.' }, spanish)).toBe(
+			'As the core says it.'
+		);
 	});
 });
 

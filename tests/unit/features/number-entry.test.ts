@@ -14,7 +14,7 @@ describe('keys', () => {
 	it('types a whole number and a fraction', () => {
 		const text = press('4', 'and', '6', '3', '/64');
 		expect(text).toBe('4 63/64');
-		expect(readEntry(text, outsideDiameter, 'in')).toEqual({ ok: true, value: 4 + 63 / 64 });
+		expect(readEntry(text, outsideDiameter, 'in')).toEqual({ ok: true, value: 4 + 63 / 64, unit: 'in' });
 	});
 
 	it('takes a fraction back with one key', () => {
@@ -31,18 +31,16 @@ describe('keys', () => {
 
 describe('what a text means', () => {
 	it('takes a bare fraction and a leading point', () => {
-		expect(readEntry('.54', faceWidth, 'in')).toEqual({ ok: true, value: 0.54 });
-		expect(readEntry('1/2', faceWidth, 'in')).toEqual({ ok: true, value: 0.5 });
+		expect(readEntry('.54', faceWidth, 'in')).toEqual({ ok: true, value: 0.54, unit: 'in' });
+		expect(readEntry('1/2', faceWidth, 'in')).toEqual({ ok: true, value: 0.5, unit: 'in' });
 	});
 
 	it.each([
 		['2', 2],
 		['5.', 5],
-		['1 1/2', 1.5],
-		['25.4 mm', 25.4],
-		['12.7"', 12.7]
+		['1 1/2', 1.5]
 	])('%s', (text, value) => {
-		expect(readEntry(text, faceWidth, 'mm')).toEqual({ ok: true, value });
+		expect(readEntry(text, faceWidth, 'mm')).toEqual({ ok: true, value, unit: 'mm' });
 	});
 
 	it.each([
@@ -63,15 +61,23 @@ describe('what a text means', () => {
 		expect(readEntry(text, outsideDiameter, 'mm')).toEqual({ ok: false, problem });
 	});
 
+	it('takes the unit that is typed behind the figure before that of the field', () => {
+		expect(readEntry('136.9 mm', outsideDiameter, 'in')).toEqual({ ok: true, value: 136.9, unit: 'mm' });
+		expect(readEntry('5 3/8"', outsideDiameter, 'mm')).toEqual({ ok: true, value: 5.375, unit: 'in' });
+		expect(readEntry('60 lbf·in', torque, 'N*m')).toEqual({ ok: true, value: 60, unit: 'lbf*in' });
+		expect(readEntry('7.5 hp', outsideDiameter, 'in')).toEqual({ ok: false, problem: 'wrong-unit' });
+		expect(readEntry('mm', outsideDiameter, 'in')).toEqual({ ok: false, problem: 'empty' });
+	});
+
 	it('counts teeth in whole numbers, without fractions', () => {
-		expect(readEntry('25', teeth, 'teeth')).toEqual({ ok: true, value: 25 });
+		expect(readEntry('25', teeth, 'teeth')).toEqual({ ok: true, value: 25, unit: 'teeth' });
 		expect(readEntry('25.5', teeth, 'teeth')).toEqual({ ok: false, problem: 'not-whole' });
 		expect(readEntry('3', teeth, 'teeth')).toEqual({ ok: false, problem: 'too-small' });
 		expect(readEntry('1/2', torque, 'N*m')).toEqual({ ok: false, problem: 'no-fractions' });
 	});
 
 	it('knows limits in the unit of the reading', () => {
-		expect(readEntry('300', outsideDiameter, 'in')).toEqual({ ok: true, value: 300 });
+		expect(readEntry('300', outsideDiameter, 'in')).toEqual({ ok: true, value: 300, unit: 'in' });
 		expect(readEntry('8001', outsideDiameter, 'mm')).toEqual({ ok: false, problem: 'too-large' });
 	});
 });

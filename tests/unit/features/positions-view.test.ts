@@ -42,7 +42,13 @@ describe('the view of the address', () => {
 	});
 
 	it('reads nonsense as the plain view', () => {
-		expect(ids('/machines?standing=splendid&order=colour&after=none')).toEqual(['p1', 'p2', 'p3', 'p4', 'p5']);
+		expect(ids('/machines?standing=splendid&order=colour&after=none')).toEqual([
+			'p1',
+			'p2',
+			'p3',
+			'p4',
+			'p5'
+		]);
 	});
 
 	it('cuts into pages that lose and repeat nothing', () => {

@@ -45,7 +45,9 @@ describe('a form that is in order', () => {
 	});
 
 	it('may leave hardness, modulus and ratio empty', () => {
-		const read = readStatementForm(form({ brinellLow: '', brinellHigh: ' ', modulus: '', modulusUnit: '', poisson: '' }));
+		const read = readStatementForm(
+			form({ brinellLow: '', brinellHigh: ' ', modulus: '', modulusUnit: '', poisson: '' })
+		);
 		expect(read).toMatchObject({
 			ok: true,
 			statement: { brinellLow: null, brinellHigh: null, modulus: null, poisson: null }
@@ -62,7 +64,10 @@ describe('a form that is in order', () => {
 
 	it('permits nothing unless it was said', () => {
 		expect(emptyStatement('2026-03-01')).toMatchObject({ permitted: 'no', validFrom: '2026-03-01' });
-		expect(readStatementForm(form({ permitted: 'no' }))).toMatchObject({ ok: true, statement: { permitted: false } });
+		expect(readStatementForm(form({ permitted: 'no' }))).toMatchObject({
+			ok: true,
+			statement: { permitted: false }
+		});
 	});
 });
 
@@ -146,9 +151,9 @@ describe('what cannot be used is named', () => {
 
 describe('two statements', () => {
 	it('differ in the fields whose text differs', () => {
-		expect(differingFields(typedFrom(iron), { ...typedFrom(iron), poisson: '0.25', name: ' Iron, class 30' })).toEqual([
-			'poisson'
-		]);
+		expect(
+			differingFields(typedFrom(iron), { ...typedFrom(iron), poisson: '0.25', name: ' Iron, class 30' })
+		).toEqual(['poisson']);
 		expect(differingFields(typedFrom(iron), typedFrom(iron))).toEqual([]);
 		expect(STATEMENT_FIELDS).toContain('source');
 	});

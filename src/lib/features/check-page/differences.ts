@@ -68,7 +68,11 @@ function figureWords(value: number | null, unit: string, { t, language }: Words)
 }
 
 /** The note beside the verdict where both came to the same. */
-export function agreementNote(tablet: Outcome, server: Outcome, words: Words): { lead: string; rest: string } {
+export function agreementNote(
+	tablet: Outcome,
+	server: Outcome,
+	words: Words
+): { lead: string; rest: string } {
 	const { t, language } = words;
 	const lead = t('differences.agree');
 	if (tablet.core !== server.core) {

@@ -16,7 +16,7 @@ export class TabletHost {
 	status: SyncStatus | null = $state.raw(null);
 	trouble: Trouble | null = $state(null);
 	/** Counts the news of each kind; a screen that reads one re-reads its rows when it moves. */
-	news: Record<News, number> = $state({ drafts: 0, records: 0, mirror: 0, person: 0, settings: 0 });
+	news: Record<News, number> = $state({ drafts: 0, records: 0, mirror: 0, person: 0 });
 	#undo: (() => void)[] = [];
 
 	async start(): Promise<void> {

@@ -15,10 +15,14 @@ export interface GearOfCheck {
 	materialName: string | null;
 }
 
-export function gearInShort(
-	gear: GearOfCheck,
-	words: Pick<Words, 't' | 'language'>
-): { what: string; made: string } {
+export interface GearInShort {
+	what: string;
+	/** Material alone, for narrow rows. */
+	material: string;
+	made: string;
+}
+
+export function gearInShort(gear: GearOfCheck, words: Pick<Words, 't' | 'language'>): GearInShort {
 	const { t, language } = words;
 	const { teeth, pitch, pressureAngle, form, finish, materialName } = gear;
 	const angle = pressureAngle === null ? '' : `${figure(pressureAngle, 3, language)}°`;
@@ -29,6 +33,7 @@ export function gearInShort(
 			// Full depth is the usual case and goes without saying in a row.
 			form === 'stub' ? `${angle} ${t('gear.form.stub')}`.trim() : angle
 		),
+		material: materialName ?? '',
 		made: joined(materialName ?? '', finish ? t(`gear.finish.${finish}`) : '')
 	};
 }

@@ -3,7 +3,8 @@
  * it was typed, whatever is wrong with it, and each field that cannot be used is named with a code whose words say
  * what to do. The command checks the result again with the schema of records.
  */
-import type { MaterialStatement } from '$lib/records/material';
+import { STRESS_UNITS, toSI } from '$lib/gear/quantity';
+import { MOST_STRESS_MPA, type MaterialStatement } from '$lib/records/material';
 
 export const STATEMENT_FIELDS = [
 	'name',
@@ -24,8 +25,6 @@ export const STATEMENT_FIELDS = [
 ] as const;
 export type StatementField = (typeof STATEMENT_FIELDS)[number];
 export type TypedStatement = Record<StatementField, string>;
-
-export const STRESS_UNITS = ['MPa', 'GPa', 'psi', 'ksi'] as const;
 
 export type StatementProblem =
 	| 'missing'
@@ -63,11 +62,17 @@ export function readStatementForm(form: FormData): ReadStatement {
 	}
 
 	const bending = numberOf(typed.allowableBending);
-	refuse('allowableBending', bending.problem ?? stressProblem(bending.value ?? 0));
+	refuse(
+		'allowableBending',
+		bending.problem ?? stressProblem(bending.value ?? 0, typed.allowableBendingUnit)
+	);
 	refuse('allowableBendingUnit', unitOf(typed.allowableBendingUnit) ? null : 'choose');
 
 	const modulus = optional(typed.modulus);
-	refuse('modulus', modulus.problem ?? (modulus.value === null ? null : stressProblem(modulus.value)));
+	refuse(
+		'modulus',
+		modulus.problem ?? (modulus.value === null ? null : stressProblem(modulus.value, typed.modulusUnit))
+	);
 	if (modulus.value !== null) refuse('modulusUnit', unitOf(typed.modulusUnit) ? null : 'choose');
 
 	const low = optional(typed.brinellLow);
@@ -172,8 +177,10 @@ function optional(text: string): ReadNumber {
 	return text.trim() === '' ? { value: null, problem: null } : numberOf(text);
 }
 
-function stressProblem(value: number): StatementProblem | null {
-	return value <= 0 ? 'not-positive' : value > 1e7 ? 'too-large' : null;
+function stressProblem(value: number, unit: string): StatementProblem | null {
+	if (value <= 0) return 'not-positive';
+	const known = unitOf(unit);
+	return known && toSI({ value, unit: known }) > MOST_STRESS_MPA ? 'too-large' : null;
 }
 
 function brinellProblem(value: number | null): StatementProblem | null {

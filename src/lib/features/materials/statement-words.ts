@@ -24,7 +24,8 @@ export function problemWords(field: StatementField, problem: StatementProblem, {
 /** What a field of another revision says, as the form would show it. */
 export function typedWords(typed: TypedStatement, field: StatementField, { t }: Words): string {
 	const text = typed[field].trim();
-	if (field === 'metallic' || field === 'permitted') return t(text === 'yes' ? 'material.yes' : 'material.no');
+	if (field === 'metallic' || field === 'permitted')
+		return t(text === 'yes' ? 'material.yes' : 'material.no');
 	return text || t('material.says-nothing');
 }
 
@@ -34,7 +35,11 @@ export interface StatementFact {
 }
 
 /** Every fact of a statement, for people who read it; what is not stated is left out. */
-export function statementFacts(statement: MaterialStatement, words: Words, day: (date: string) => string): StatementFact[] {
+export function statementFacts(
+	statement: MaterialStatement,
+	words: Words,
+	day: (date: string) => string
+): StatementFact[] {
 	const { t } = words;
 	const facts: StatementFact[] = [
 		{ name: 'material.field.condition', text: statement.condition },

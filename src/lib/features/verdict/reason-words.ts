@@ -18,13 +18,22 @@ const CODED: Record<string, string> = {
 
 export function reasonWords(reason: Reason, words: Words): string {
 	const key = `reason.${reason.code}`;
-	if (!isMessage(key)) return reason.text;
+	return isMessage(key) ? words.t(key, valuesOf(reason, words)) : reason.text;
+}
+
+/** For a row of a table: a few words where the catalogue has them, the whole sentence where it has not. */
+export function reasonInShort(reason: Reason, words: Words): string {
+	const key = `reason-short.${reason.code}`;
+	return isMessage(key) ? words.t(key, valuesOf(reason, words)) : reasonWords(reason, words);
+}
+
+function valuesOf(reason: Reason, words: Words): Values {
 	const values: Values = {};
 	for (const [name, value] of Object.entries(reason.values ?? {})) {
 		values[name] =
 			typeof value === 'number' ? numberWords(name, value, words) : codeWords(name, value, words);
 	}
-	return words.t(key, values);
+	return values;
 }
 
 function numberWords(name: string, value: number, { language }: Words): string {

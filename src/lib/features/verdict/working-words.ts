@@ -36,7 +36,7 @@ export function workingRows(lines: readonly WorkingLine[], words: Words): Workin
 		symbol,
 		name: translated(`working.${name}`, name, words),
 		expression: translated(`expression.${expression}`, expression, words),
-		numbers,
+		numbers: numbersWords(numbers, words),
 		value: shown(value, words),
 		unit: unit === '1' ? '' : unit,
 		inch: inchWords(value, unit, words),
@@ -51,6 +51,12 @@ export function sourceWords(source: string, words: Words): string {
 		.map((part) => translated(`source.${part}`, part, words))
 		.join('; ')
 		.replace(/(edition from memory|from memory)/g, (remark) => translated(`source.${remark}`, remark, words));
+}
+
+/** Figures read the same everywhere; only a line of a table is put in words. */
+function numbersWords(numbers: string, words: Words): string {
+	const entry = /^table at (.+)$/.exec(numbers)?.[1];
+	return entry ? words.t('expression.table at N').replace('N', entry) : numbers;
 }
 
 function inchWords(value: number, unit: string, words: Words): string {

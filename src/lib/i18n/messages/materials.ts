@@ -110,10 +110,7 @@ export const materials = {
 	'material.field.source': ['Source', 'Fuente'],
 	'material.field.edition': ['Edition', 'Edición'],
 	'material.field.validFrom': ['Valid from', 'Válido desde'],
-	'material.hint.condition': [
-		'as cast, normalised, hardened and tempered …',
-		'de fundición, normalizado, templado y revenido …'
-	],
+	'material.hint.condition': ['Such as normalised, or as cast.', 'Por ejemplo normalizado, o de fundición.'],
 	'material.hint.metallic': ['Decides which velocity law applies.', 'Decide qué ley de velocidad se aplica.'],
 	'material.hint.allowableBending': [
 		'For one-way loading, without velocity or service factor. Write 8500, not 8,500.',

@@ -164,6 +164,10 @@ export const tablet = {
 		'{field} no usa fracción: escriba un punto.'
 	],
 	'entry.not-a-number': ['This is not a figure: use the digits.', 'Esto no es una cifra: use los dígitos.'],
+	'entry.wrong-unit': [
+		'{field} is not measured in that unit: type the figure alone.',
+		'{field} no se mide en esa unidad: escriba solo la cifra.'
+	],
 	'entry.too-small': [
 		'{field}: at least {least}. Check the point and the unit.',
 		'{field}: al menos {least}. Revise el punto y la unidad.'

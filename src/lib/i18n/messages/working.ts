@@ -71,6 +71,27 @@ export const working = {
 		'The Lewis method starts at {fewest} teeth, this gear has {teeth}. Count again, or have the gear rated by an engineer.',
 		'El método de Lewis empieza en {fewest} dientes; este engrane tiene {teeth}. Cuente otra vez, o pida a un ingeniero que lo evalúe.'
 	],
+	'reason-short.material-not-permitted': [
+		"{material} is not on the plant's list",
+		'{material} no está en la lista de la planta'
+	],
+	'reason-short.out-of-range': ['Readings or units out of range', 'Lecturas o unidades fuera de rango'],
+	'reason-short.missing': ['Missing: {field}', 'Falta: {field}'],
+	'reason-short.teeth-missing': ['Missing: number of teeth', 'Falta: número de dientes'],
+	'reason-short.speed-missing': ['Missing: speed of this gear', 'Falta: velocidad de este engrane'],
+	'reason-short.load-unknown': ['The load is not known', 'No se conoce la carga'],
+	'reason-short.kind-not-covered': ['Not a spur gear: {kind}', 'No es engrane recto: {kind}'],
+	'reason-short.mate-pitch-differs': ['Gear and mate do not mesh', 'El engrane y su conjugado no engranan'],
+	'reason-short.speed-beyond-law': [
+		'Too fast for {law}: {velocity}',
+		'Demasiado rápido para {law}: {velocity}'
+	],
+	'reason-short.profile-shift-not-covered': ['Has a profile shift', 'Tiene corrección de perfil'],
+	'reason-short.form-not-in-table': ['Tooth form not in the table', 'Forma del diente fuera de la tabla'],
+	'reason-short.too-few-teeth': [
+		'{teeth} teeth; the method starts at {fewest}',
+		'{teeth} dientes; el método empieza en {fewest}'
+	],
 	'form-rule.geometry': ['geometry', 'geometría'],
 	'form-rule.lower-of-both': ['the lower of both methods', 'el menor de ambos métodos'],
 

@@ -16,10 +16,11 @@ export type EntryProblem =
 	| 'fraction-over-one'
 	| 'no-fractions'
 	| 'not-a-number'
+	| 'wrong-unit'
 	| 'too-small'
 	| 'too-large';
 
-export type Entry = { ok: true; value: number } | { ok: false; problem: EntryProblem };
+export type Entry = { ok: true; value: number; unit: ReadingUnit } | { ok: false; problem: EntryProblem };
 
 /** What a key makes of the text. A key that cannot go on from here leaves the text as it is. */
 export function afterKey(text: string, key: PadKey): string {
@@ -33,21 +34,48 @@ export function afterKey(text: string, key: PadKey): string {
 }
 
 const FRACTION = /^(?:(\d+) )?(\d+)\/(2|4|8|16|32|64)$/;
-/** A unit that a calliper or a habit puts behind the figure. */
-const SUFFIX = /\s*(mm|in|inch|inches|"|″|hp|kw|w|rpm|n·?m|nm)\.?$/i;
+/** Units that a calliper or a habit puts behind the figure. What stands there counts before the unit of the field. */
+const SUFFIXES: readonly [RegExp, ReadingUnit][] = [
+	[/mm\.?$/i, 'mm'],
+	[/(in|inch|inches)\.?$|["″]$/i, 'in'],
+	[/hp$/i, 'hp'],
+	[/kw$/i, 'kW'],
+	[/w$/i, 'W'],
+	[/rpm$/i, 'rpm'],
+	[/n[·*]?m$/i, 'N*m'],
+	[/lbf?[·*-]?ft$/i, 'lbf*ft'],
+	[/lbf?[·*-]?in$/i, 'lbf*in'],
+	[/teeth$/i, 'teeth']
+];
+
+function apart(text: string): { figure: string; unit: ReadingUnit | null } {
+	const clean = text.trim().replace(/\s+/g, ' ');
+	// "lbf·in" ends in "in" too: the longest match is the unit that was meant.
+	const found = SUFFIXES.map(([pattern, unit]) => ({ unit, at: clean.search(pattern) }))
+		.filter(({ at }) => at >= 0)
+		.sort((a, b) => a.at - b.at)[0];
+	return found
+		? { figure: clean.slice(0, found.at).trim(), unit: found.unit }
+		: { figure: clean, unit: null };
+}
 
 /** The figure a text means, within what is possible for the field. */
 export function readEntry(text: string, field: Field, unit: ReadingUnit): Entry {
-	const clean = text.trim().replace(SUFFIX, '').replace(/\s+/g, ' ').trim();
-	const parsed = parse(clean, field);
+	const { figure, unit: typed } = apart(text);
+	if (typed && !field.units.includes(typed)) return { ok: false, problem: 'wrong-unit' };
+	const meant = typed ?? unit;
+	const parsed = parse(figure, field);
 	if (!parsed.ok) return parsed;
-	const value = inLimitUnit(parsed.value, unit);
+	const value = inLimitUnit(parsed.value, meant);
 	if (value < field.least) return { ok: false, problem: 'too-small' };
 	if (value > field.most) return { ok: false, problem: 'too-large' };
-	return parsed;
+	return { ...parsed, unit: meant };
 }
 
-function parse(text: string, field: Field): Entry {
+function parse(
+	text: string,
+	field: Field
+): { ok: true; value: number } | { ok: false; problem: EntryProblem } {
 	if (text === '') return { ok: false, problem: 'empty' };
 	if (text.includes('/')) {
 		if (!field.fractions) return { ok: false, problem: 'no-fractions' };
