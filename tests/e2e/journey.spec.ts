@@ -177,3 +177,31 @@ test('bad input on the keypad names field and remedy and keeps what was typed', 
 	await expect(page.locator('.box input')).toHaveValue('136.9 mm');
 	await expect(page.getByText('5.3898 in')).toBeVisible();
 });
+
+test('signing out keeps what is unsent, and is refused without the server', async ({ page, server }) => {
+	await readyTablet(page, 'millwright');
+	await page.goto('/tablet/kept');
+	await server.stop();
+	await page.getByRole('button', { name: /Sign out/ }).tap();
+	await expect(page.getByText(/Signing out needs a connection/)).toBeVisible();
+	await page.goto('/tablet');
+	await expect(page.getByRole('link', { name: /A-117/ })).toBeVisible();
+	await page.getByRole('link', { name: /A-150/ }).tap();
+	await page.getByRole('button', { name: 'Start a check' }).first().tap();
+	await page.getByRole('link', { name: 'Result', exact: true }).tap();
+	await page.getByRole('button', { name: 'Keep this check' }).tap();
+	await expect(page.getByRole('heading', { name: /Waiting to send/ })).toBeVisible();
+
+	await server.start();
+	await page.context().clearCookies();
+	await page.goto('/tablet/kept');
+	await expect(page.getByRole('main').getByText(/Sign in to send/)).toBeVisible();
+	await page.getByRole('button', { name: /Sign out/ }).tap();
+	await page.waitForURL('**/sign-in**');
+
+	// Another person signs in; the record goes out under the name of who made it.
+	await signIn(page, 'planner', '/tablet/kept');
+	await expect(page.getByRole('listitem').getByText(/Received by the plant/)).toBeVisible();
+	await page.goto('/checks');
+	await expect(page.getByRole('row').filter({ hasText: 'A-150' }).first()).toContainText('Bexley');
+});

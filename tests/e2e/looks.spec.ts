@@ -11,13 +11,15 @@ async function isClean(page: Page): Promise<void> {
 	const found = violations.map(
 		({ id, impact, nodes }) => `${impact} ${id}: ${nodes.map(({ target }) => target.join(' ')).join(', ')}`
 	);
-	expect(found, page.url()).toEqual([]);
+	expect.soft(found, page.url()).toEqual([]);
 }
 
 /** Nothing may be cut off sideways. */
 async function fitsAcross(page: Page): Promise<void> {
 	const wide = await page.evaluate(() => document.documentElement.scrollWidth - innerWidth);
-	expect(wide, `${page.url()} is ${wide} px too wide`).toBeLessThanOrEqual(0);
+	expect
+		.soft(wide, `${page.url()} at ${page.viewportSize()?.width} is ${wide} px too wide`)
+		.toBeLessThanOrEqual(0);
 }
 
 async function everyWay(page: Page, name: string): Promise<void> {

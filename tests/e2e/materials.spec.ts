@@ -36,7 +36,7 @@ test('a withdrawn material gives "not permitted" on the tablet after the next pu
 	);
 
 	await supervisor.locator('input[name=source]').fill('plant test report 12');
-	await supervisor.locator('input[name=permitted][value=no]').check();
+	await supervisor.locator('select[name=permitted]').selectOption('no');
 	await supervisor.locator('form:has(input[name=source]) button[type=submit]').click();
 	await expect
 		.poll(

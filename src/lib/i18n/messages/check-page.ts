@@ -74,5 +74,9 @@ export const checkPage = {
 	'caution.page.lead': [
 		'A screening of tooth strength from the readings shown.',
 		'Un examen de la resistencia del diente con las lecturas mostradas.'
+	],
+	'caution.page.defer': [
+		"The site's isolation procedure, local codes, the drawing or maker's data, and a licensed engineer where required come first.",
+		'Antes valen el procedimiento de bloqueo del sitio, los códigos locales, el plano o los datos del fabricante y, donde se exija, un ingeniero con licencia.'
 	]
 } as const satisfies Record<string, readonly [string, string]>;

@@ -103,6 +103,10 @@ export const tablet = {
 	],
 
 	'tablet.sign-in': ['Sign in', 'Iniciar sesión'],
+	'tablet.sign-out-offline': [
+		'Signing out needs a connection to the plant. Nothing was changed. Leave the tablet signed in, or try again at a better place.',
+		'Cerrar sesión requiere conexión con la planta. Nada cambió. Deje la sesión abierta o intente en un lugar con señal.'
+	],
 	'tablet.sign-out': ['Sign out {name}', 'Cerrar sesión de {name}'],
 
 	'check.not-here': ['This check is not on this tablet', 'Esta verificación no está en la tableta'],
@@ -243,10 +247,9 @@ export const tablet = {
 		'The speed of this gear, not of the motor. Read it from the nameplate of the drive, or with a tachometer before the machine is isolated.',
 		'La velocidad de este engrane, no la del motor. Léala en la placa del mando o con un tacómetro antes de aislar la máquina.'
 	],
-	'drive.duty-on-record': [
-		'On record here: {duty}. The factor multiplies the load once.',
-		'Registrado aquí: {duty}. El factor multiplica la carga una sola vez.'
-	],
+	'drive.duty-on-record': ['On record here: {duty}', 'Registrado aquí: {duty}'],
+
+	'drive.factor-source': ['From: {source}', 'Fuente: {source}'],
 
 	'spare.finish': ['How were its teeth made?', '¿Cómo se hicieron sus dientes?'],
 	'spare.finish-text': [
