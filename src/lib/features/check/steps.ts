@@ -1,4 +1,5 @@
 /** The named steps of a check, in the order in which they are offered; any can be visited at any time. */
+import type { Missing } from '$lib/records/assemble';
 import { isReading } from '$lib/records/reading';
 import type { CheckAnswers } from '$lib/records/check';
 
@@ -45,6 +46,24 @@ export function isAnswered(step: StepName, answers: CheckAnswers, kept: boolean)
 		case 'keep':
 			return false;
 	}
+}
+
+/** Where each missing answer is given: the step, and the reading of it. */
+const PLACES: Record<Missing, string> = {
+	teeth: 'measure?reading=teeth',
+	faceWidth: 'measure?reading=faceWidth',
+	pitch: 'which-gear',
+	pressureAngle: 'which-gear',
+	form: 'which-gear',
+	load: 'drive?reading=load',
+	speed: 'drive?reading=speed',
+	serviceFactor: 'drive?reading=service',
+	finish: 'spare',
+	material: 'spare'
+};
+
+export function placeOf(field: string): string {
+	return PLACES[field as Missing] ?? 'machine';
 }
 
 function loadAnswered({ loadKind, power, torque }: CheckAnswers): boolean {

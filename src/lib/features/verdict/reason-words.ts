@@ -65,11 +65,17 @@ export function verdictSentence({ verdict, reasons }: Outcome, words: Words): st
 	if (verdict === 'not-permitted') {
 		return words.t('verdict.say.not-permitted', { material: String(first?.values?.material ?? '') });
 	}
+	if (first?.code === 'missing') return words.t('verdict.say.missing');
 	if (verdict === 'cannot-say') return first ? reasonWords(first, words) : '';
 	return words.t(`verdict.say.${verdict}`);
 }
 
 /** What stands below: every reason that the sentence and the figures do not tell. */
 export function otherReasons({ reasons }: Outcome): Reason[] {
-	return reasons.slice(1).filter(({ code }) => !code.startsWith('bending-margin'));
+	return reasons.slice(1).filter(({ code }) => code !== 'missing' && !code.startsWith('bending-margin'));
+}
+
+/** The answers that are still missing, by the codes of records/assemble.ts. */
+export function missingFields({ reasons }: Outcome): string[] {
+	return reasons.filter(({ code }) => code === 'missing').map(({ values }) => String(values?.field));
 }

@@ -15,6 +15,10 @@ export const verdict = {
 		'El valor medio soporta, el extremo malo no.'
 	],
 	'verdict.say.will-not-carry': ['Bending of this gear decides.', 'Decide la flexión de este engrane.'],
+	'verdict.say.missing': [
+		'Something is missing. Go to its step and give it:',
+		'Falta algo. Vaya a su paso y dé el dato:'
+	],
 	'verdict.say.not-permitted': [
 		"{material} is not on the plant's list.",
 		'{material} no está en la lista de la planta.'
