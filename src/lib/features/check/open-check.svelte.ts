@@ -62,7 +62,8 @@ export class OpenCheck {
 		]);
 		this.record = record ?? null;
 		// What is on the screen is newer than what was read while it was being typed.
-		if (!this.draft) this.draft = draft && draft.plantId === plant ? draft : null;
+		const own = draft?.plantId === plant && draft.authorId === this.#person.personId;
+		if (!this.draft) this.draft = draft && own ? draft : null;
 		if (record) this.draft = null;
 		const of = record?.record.body ?? this.draft;
 		if (!of) {
