@@ -205,3 +205,33 @@ test('signing out keeps what is unsent, and is refused without the server', asyn
 	await page.goto('/checks');
 	await expect(page.getByRole('row').filter({ hasText: 'A-150' }).first()).toContainText('Bexley');
 });
+
+test('the steps work by keyboard alone', async ({ page }) => {
+	await readyTablet(page, 'millwright');
+	await page.getByRole('searchbox').focus();
+	await page.keyboard.type('a142');
+	await page.keyboard.press('Tab');
+	await page.keyboard.press('Enter');
+	await page.getByRole('button', { name: 'Start a check' }).first().focus();
+	await page.keyboard.press('Enter');
+	await page.getByLabel(/isolation permit/).waitFor();
+	await page.getByRole('link', { name: 'Measure', exact: true }).focus();
+	await page.keyboard.press('Enter');
+	for (const [title, text] of [
+		['Teeth', '56'],
+		['Outside diameter', '9.66'],
+		['Face width', '2']
+	] as const) {
+		await page.getByRole('heading', { level: 1, name: title }).waitFor();
+		await page.keyboard.type(text);
+		await page.keyboard.press('Enter');
+	}
+	const form = page.getByRole('radiogroup', { name: 'Pressure angle and form' });
+	await form.getByRole('radio').first().focus();
+	await page.keyboard.press('ArrowDown');
+	await expect(form.getByRole('radio', { name: /14\.5° full depth/ })).toBeFocused();
+	await expect(form.getByRole('radio', { name: /14\.5° full depth/ })).toBeChecked();
+	await page.keyboard.press('Tab');
+	await page.keyboard.press('Tab');
+	await expect(page.getByRole('link', { name: 'Next: Drive' })).toBeFocused();
+});
