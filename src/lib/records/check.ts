@@ -7,10 +7,11 @@ import { z } from 'zod';
 import { uuid } from './ids';
 import { pitch } from './mirror';
 import { outcome } from './outcome';
+import { strictFields } from './plain-words';
 import { answeredIn } from './reading';
 
 /** What the person answered so far. A draft is this with gaps; a kept check is this as it stood. */
-export const checkAnswers = z.strictObject({
+export const checkAnswers = strictFields('The answers', {
 	/** Number of the site's isolation permit, as free text. */
 	permit: z.string().max(80),
 	/** When the cautions were shown and put behind: ISO 8601, tablet's clock. */
@@ -38,7 +39,7 @@ export const checkAnswers = z.strictObject({
 });
 export type CheckAnswers = z.infer<typeof checkAnswers>;
 
-export const checkBody = z.strictObject({
+export const checkBody = strictFields('A check', {
 	machineId: uuid,
 	positionId: uuid,
 	answers: checkAnswers,

@@ -6,11 +6,12 @@ import { z } from 'zod';
 import { canonicalJson, sha256 } from './canonical';
 import { checkBody } from './check';
 import { uuid } from './ids';
+import { strictFields } from './plain-words';
 
 export const SCHEMA_VERSION = 1;
 const digest = z.string().regex(/^[0-9a-f]{64}$/, 'A hash is 64 lower-case hexadecimal digits.');
 
-export const envelope = z.strictObject({
+export const envelope = strictFields('A record', {
 	schemaVersion: z.literal(
 		SCHEMA_VERSION,
 		'This version of the record is not known here: update the tablet.'

@@ -7,7 +7,7 @@ import { z } from 'zod';
 import type { EvaluateInput, InvalidInput } from '$lib/gear/contract';
 import { LENGTH_UNITS } from '$lib/gear/quantity';
 import { invalidInput } from './invalid-input';
-import { fields, must, oneOf } from './plain-words';
+import { must, oneOf, strictFields } from './plain-words';
 import { force, length, modulus, power, speed, stress, torque, velocity } from './quantity';
 
 const between = (name: string, from: number, to: number) => {
@@ -23,18 +23,15 @@ const whole = (name: string, to: number) => {
 		.max(to, `${name} must be at most ${to}.`);
 };
 
-const strict = <Shape extends z.core.$ZodShape>(name: string, shape: Shape) =>
-	z.strictObject(shape, fields(name, Object.keys(shape)));
-
 const choice = <const Words extends readonly [string, ...string[]]>(name: string, words: Words) =>
 	z.enum(words, oneOf(name, words));
 
 const pitch = z.discriminatedUnion(
 	'system',
 	[
-		strict('Pitch', { system: z.literal('diametral'), value: between('Diametral pitch', 0.1, 500) }),
-		strict('Pitch', { system: z.literal('module'), value: between('Module (mm)', 0.05, 250) }),
-		strict('Pitch', {
+		strictFields('Pitch', { system: z.literal('diametral'), value: between('Diametral pitch', 0.1, 500) }),
+		strictFields('Pitch', { system: z.literal('module'), value: between('Module (mm)', 0.05, 250) }),
+		strictFields('Pitch', {
 			system: z.literal('circular'),
 			value: between('Circular pitch', 0.001, 800),
 			unit: choice('Unit of circular pitch', LENGTH_UNITS)
@@ -46,7 +43,7 @@ const pitch = z.discriminatedUnion(
 const form = z.union(
 	[
 		z.literal(['full-depth', 'stub']),
-		strict('Tooth form', {
+		strictFields('Tooth form', {
 			addendum: between('Addendum (in modules)', 0.1, 2),
 			dedendum: between('Dedendum (in modules)', 0.1, 2.5),
 			tipRadius: between('Tip radius (in modules)', 0, 1)
@@ -55,7 +52,7 @@ const form = z.union(
 	must('Tooth form', 'full-depth, stub, or an object with addendum, dedendum and tipRadius')
 );
 
-const material = strict('Material', {
+const material = strictFields('Material', {
 	name: z
 		.string(must('Name of the material', 'text'))
 		.min(1, 'Name of the material must not be empty.')
@@ -98,7 +95,7 @@ function agree(
 	}
 }
 
-const gear = strict('Gear', {
+const gear = strictFields('Gear', {
 	...toothedPart,
 	faceWidth: length('Face width'),
 	finish,
@@ -111,7 +108,7 @@ const gear = strict('Gear', {
 	}
 });
 
-const mate = strict('Mate', {
+const mate = strictFields('Mate', {
 	kind: toothedPart.kind,
 	teeth: toothedPart.teeth,
 	pitch: pitch.optional(),
@@ -129,9 +126,9 @@ const mate = strict('Mate', {
 const load = z.union(
 	[
 		z.literal('unknown'),
-		strict('Load', { power: power('Power') }),
-		strict('Load', { torque: torque('Torque') }),
-		strict('Load', { tangentialForce: force('Tangential force') })
+		strictFields('Load', { power: power('Power') }),
+		strictFields('Load', { torque: torque('Torque') }),
+		strictFields('Load', { tangentialForce: force('Tangential force') })
 	],
 	must(
 		'Load',
@@ -139,7 +136,7 @@ const load = z.union(
 	)
 );
 
-const drive = strict('Drive', {
+const drive = strictFields('Drive', {
 	load,
 	speed: speed('Speed').optional(),
 	velocity: velocity('Velocity').optional(),
@@ -149,13 +146,13 @@ const drive = strict('Drive', {
 
 const limit = (of: string) => velocity(`Speed limit for ${of} teeth`).nullable().default(null);
 
-const rules = strict('Rules', {
+const rules = strictFields('Rules', {
 	formFactor: choice('Form factor rule', ['handbook', 'geometry', 'lower-of-both']),
 	cutLaw: z.literal([600, 1200], oneOf('Law for cut teeth', [600, 1200])),
 	bendingMargin: between('Needed margin in bending', 0.1, 100),
 	wearMargin: between('Needed margin in wear', 0.1, 100),
 	reversingFactor: between('Reversing factor', 0.1, 1),
-	speedLimit: strict('Speed limits', {
+	speedLimit: strictFields('Speed limits', {
 		cast: limit('cast'),
 		cut: limit('cut'),
 		hobbed: limit('hobbed'),
@@ -163,13 +160,13 @@ const rules = strict('Rules', {
 	})
 }).partial();
 
-const uncertainty = strict('Uncertainty', {
+const uncertainty = strictFields('Uncertainty', {
 	faceWidth: between('Uncertainty of the face width (a fraction)', 0, 0.5),
 	load: between('Uncertainty of the load (a fraction)', 0, 0.5),
 	speed: between('Uncertainty of the speed (a fraction)', 0, 0.5)
 }).partial();
 
-export const evaluateInput = strict('Check', {
+export const evaluateInput = strictFields('Check', {
 	gear,
 	mate: mate.optional(),
 	original: gear.optional(),

@@ -2,6 +2,7 @@
  * How schemas speak: every message names the field and the remedy in plain words. A field that is missing, has the
  * wrong shape or is out of range gets the same sentence, so nobody has to learn a schema's vocabulary.
  */
+import { z } from 'zod';
 
 interface RawIssue {
 	code?: string | undefined;
@@ -26,6 +27,11 @@ export function fields(name: string, known: readonly string[]) {
 				? `This field is not known here. ${name} has: ${list}. Correct its name or leave it out.`
 				: mustWords(name, `an object with ${list}`, input)
 	};
+}
+
+/** A strict object that says, when it cannot be read, which fields it has. */
+export function strictFields<Shape extends z.core.$ZodShape>(name: string, shape: Shape) {
+	return z.strictObject(shape, fields(name, Object.keys(shape)));
 }
 
 function mustWords(name: string, what: string, input: unknown): string {

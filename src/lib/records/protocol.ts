@@ -5,12 +5,13 @@
 import { z } from 'zod';
 import { uuid } from './ids';
 import { mirrorChange } from './mirror';
+import { strictFields } from './plain-words';
 
 export const PUSH_MAX_RECORDS = 50;
 export const PUSH_MAX_BYTES = 256 * 1024;
 export const PULL_PAGE = 500;
 
-export const pushRequest = z.strictObject({
+export const pushRequest = strictFields('The request', {
 	tabletId: uuid,
 	/** The highest number drawn per author on this tablet for this plant; sent with every ping. */
 	drawn: z

@@ -36,7 +36,8 @@ export const REFUSAL_STATUS: Record<RefusalCode, number> = {
 export const REFUSAL_TEXT: Record<RefusalCode, string> = {
 	'invalid-input': 'Something in this request cannot be used. See the fields named.',
 	'signed-out': 'Sign in first.',
-	'not-allowed': 'Your role at this plant does not allow this.',
+	'not-allowed':
+		'Your role at this plant does not allow this, or the request did not come from a page of this application (header x-cogmark: 1).',
 	'tablet-blocked': 'This tablet is blocked. Hand it to a supervisor.',
 	'not-found': 'There is nothing here by this name.',
 	'too-large': 'This is too much at once. Send less.',
