@@ -4,6 +4,7 @@
  */
 import { building } from '$app/environment';
 import type { Handle, HandleServerError, RequestEvent } from '@sveltejs/kit';
+import { isLanguage, languageFromHeader, type Language } from '$lib/i18n/language';
 import { clearSessionCookie, sessionCookie, setSessionCookie } from '$lib/server/auth/cookie';
 import { readSession } from '$lib/server/auth/session';
 import { databaseUnreachable } from '$lib/server/db/postgres-error';
@@ -44,14 +45,9 @@ async function identify(event: RequestEvent): Promise<void> {
 	}
 }
 
-function languageOf(event: RequestEvent): 'en' | 'es' {
+function languageOf(event: RequestEvent): Language {
 	const chosen = event.cookies.get('language');
-	if (chosen === 'en' || chosen === 'es') return chosen;
-	for (const part of (event.request.headers.get('accept-language') ?? '').split(',')) {
-		const code = part.trim().slice(0, 2).toLowerCase();
-		if (code === 'en' || code === 'es') return code;
-	}
-	return 'en';
+	return isLanguage(chosen) ? chosen : languageFromHeader(event.request.headers.get('accept-language'));
 }
 
 /** The content policy itself comes from svelte.config.js; what a meta tag cannot say stands here. */

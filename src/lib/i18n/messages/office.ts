@@ -8,7 +8,6 @@ export const office = {
 	'office.your-plants': ['Plant: {plant}. Work at another', 'Planta: {plant}. Trabajar en otra'],
 	'office.work-at': ['{plant}, {role}', '{plant}, {role}'],
 	'office.home': ['Cogmark: machines', 'Cogmark: máquinas'],
-	'office.margin-figure': ['Margin {margin}', 'Margen {margin}'],
 	'office.low-figure': ['low {low}', 'bajo {low}'],
 	'office.needs-figure': ['needs {needed}', 'requiere {needed}'],
 	'office.by': ['{author}, {tablet}', '{author}, {tablet}'],
@@ -82,7 +81,6 @@ export const office = {
 		'Aún no llega ninguna verificación. La primera aparece aquí en cuanto una tableta la envíe.'
 	],
 
-	'machine.positions': ['Gear positions', 'Posiciones de engrane'],
 	'machine.origin.inch': ['inch gears', 'engranes en pulgadas'],
 	'machine.origin.metric': ['metric gears', 'engranes métricos'],
 	'machine.standing': ['Stands now', 'Estado actual'],
@@ -113,7 +111,6 @@ export const office = {
 	'checks.column.gear': ['Gear', 'Engrane'],
 	'checks.column.performed': ['Made', 'Hecha'],
 	'checks.column.received': ['Received', 'Recibida'],
-	'checks.column.by': ['By', 'Por'],
 	'checks.column.open': ['Check', 'Verificación'],
 	'checks.open': ['Open', 'Abrir'],
 	'checks.differs': ['tablet and server differ', 'tableta y servidor difieren'],
