@@ -4,7 +4,7 @@
  */
 import { getContext, setContext } from 'svelte';
 import { translator, type MessageKey, type Values } from './catalogue';
-import type { Language } from './language';
+import { isLanguage, languageFromHeader, type Language } from './language';
 
 const KEY = Symbol('language');
 
@@ -26,6 +26,14 @@ export class Words {
 		document.cookie = `language=${language}; path=/; max-age=31536000; samesite=lax`;
 		localStorage.setItem('language', language);
 	}
+}
+
+/** For pages that no server renders: the language this device was left in, else the browser's. */
+export function deviceLanguage(): Language {
+	const left = localStorage.getItem('language');
+	const language = isLanguage(left) ? left : languageFromHeader(navigator.languages.join(','));
+	document.documentElement.lang = language;
+	return language;
 }
 
 export function provideWords(language: Language): Words {

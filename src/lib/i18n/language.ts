@@ -6,7 +6,7 @@ export function isLanguage(value: unknown): value is Language {
 	return value === 'en' || value === 'es';
 }
 
-/** The first known language of an Accept-Language header; English where there is none. */
+/** The first known language of an Accept-Language header or a browser's list; English where there is none. */
 export function languageFromHeader(header: string | null): Language {
 	for (const part of (header ?? '').split(',')) {
 		const code = part.trim().slice(0, 2).toLowerCase();
