@@ -27,7 +27,7 @@ export const common = {
 	],
 	'caution.strip.rest': [
 		'No rating, no permission to run. Site isolation comes first.',
-		'No es una clasificación ni un permiso para operar. Primero, el bloqueo del sitio.'
+		'No clasifica ni permite operar. Primero, el bloqueo del sitio.'
 	],
 	'caution.page': [
 		'No rating to AGMA or ISO, no permission to run. Shaft, key, rim, bearings, lubrication and life are not covered.',

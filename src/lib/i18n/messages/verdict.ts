@@ -32,7 +32,7 @@ export const verdict = {
 	'verdict.bending-this': ['Bending, this gear', 'Flexión, este engrane'],
 	'verdict.by-speed': ['What it carries, by speed', 'Lo que soporta, según la velocidad'],
 	'verdict.beyond': ["beyond the plant's margin", 'fuera del margen de la planta'],
-	'verdict.this-drive': ['this drive, {power}', 'este accionamiento, {power}'],
+	'verdict.this-drive': ['this drive, {power}', 'este mando, {power}'],
 	'verdict.nothing-to-change': ['Nothing to change.', 'Nada que cambiar.'],
 	'verdict.carries-up-to': [
 		"At this speed it would carry up to {first} ({second}) with the plant's margin.",
