@@ -3,6 +3,7 @@
  * Power needs the velocity, torque the diameter; a load that is not known gives no force.
  */
 import type { Load } from './contract';
+import { toSI } from './quantity';
 import { SOURCES } from './sources';
 import { unrecorded, type Recorder } from './working';
 
@@ -49,4 +50,17 @@ export function designForce(force: number, serviceFactor: number, recorder: Reco
 		{ Ko: serviceFactor, Wt: force },
 		({ Ko, Wt }) => Ko * Wt
 	);
+}
+
+/**
+ * Power P in W that the drive takes at a speed n in rpm; null where the load is unknown, is a bare force, or its
+ * torque has no speed. P as given, or P = π n T / 30 (N·m, rpm).
+ * Source: mechanics (definition of power).
+ * @example drivePower({ torque: { value: 100, unit: 'N*m' } }, 300) // 3141.592654
+ * @example drivePower({ power: { value: 2, unit: 'kW' } }, null) // 2000
+ */
+export function drivePower(load: Load, speed: number | null): number | null {
+	if (load === 'unknown' || 'tangentialForce' in load) return null;
+	if ('power' in load) return toSI(load.power);
+	return speed === null ? null : (Math.PI * speed * toSI(load.torque)) / 30;
 }

@@ -1,6 +1,4 @@
-/** Ends and ticks of a plot's axes, and the power of a drive in watts for its working point. */
-import type { EvaluateInput } from '$lib/gear/contract';
-import { toSI } from '$lib/gear/quantity';
+/** Ends and ticks of a plot's axes. */
 
 /** The next round figure at or above a value: 1, 1.5, 2, 2.5, 3, 4, 5, 6, 8 times a power of ten. */
 export function niceEnd(value: number): number {
@@ -18,14 +16,4 @@ export function ticks(end: number): number[] {
 	const step =
 		([1, 2, 2.5, 5, 10].find((candidate) => candidate * scale >= rough * (1 - 1e-9)) ?? 10) * scale;
 	return Array.from({ length: Math.floor(end / step + 1e-9) + 1 }, (_, i) => i * step);
-}
-
-/** Power of the drive in W at its speed: as given, or torque times angular speed; null where it is not known. */
-export function drivePower({ drive }: EvaluateInput): number | null {
-	if (drive.load === 'unknown') return null;
-	if ('power' in drive.load) return toSI(drive.load.power);
-	if ('torque' in drive.load && drive.speed) {
-		return toSI(drive.load.torque) * toSI(drive.speed) * ((2 * Math.PI) / 60);
-	}
-	return null;
 }
