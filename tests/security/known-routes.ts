@@ -64,6 +64,8 @@ export const KNOWN_ROUTES: Record<string, KnownRoute> = {
 	},
 	'POST /api/v1/evaluate': { who: 'member', status: [422], asked: () => ({ init: jsonInit({}) }) },
 
+	'GET /api/v1/recompute': { who: OFFICE, status: [200] },
+
 	'load /(office)': { who: OFFICE, status: [200] },
 	'load /(office)/machines': { who: OFFICE, status: [200] },
 	'load /(office)/machines/[machine]': {

@@ -41,6 +41,13 @@ test.each<[string, Partial<Outcome>]>([
 	expect(outcomesAgree({ ...outcome, ...change }, outcome)).toBe(false);
 });
 
+test('of two versions of the core, what only one of them knows does not matter', () => {
+	const older = { ...outcome, core: '0.0.1', wear: null };
+	expect(outcomesAgree(older, outcome)).toBe(true);
+	expect(outcomesAgree({ ...older, bendingMargin: 1.7 }, outcome)).toBe(false);
+	expect(outcomesAgree({ ...older, verdict: 'close' }, outcome)).toBe(false);
+});
+
 test('a field that one core does not know counts as null', () => {
 	const { original: _original, ...older } = outcome;
 	expect(outcomesAgree(older as Outcome, outcome)).toBe(true);

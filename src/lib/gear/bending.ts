@@ -76,36 +76,53 @@ export function bendingMargin(allowable: number, stress: number, recorder: Recor
 }
 
 /**
- * Tangential force Wp in N at which the margin is the needed one, service factor Ko taken off.
- * Wp = Sb F m Y / (Mn Ko Kv).
- * Source: the Lewis formula solved for the force; Wentzell, Machine Design, Ex. 12.5, p. 263.
- * @example permittedForce(150, { faceWidth: 60, module: 5, formFactor: 0.358, velocityFactor: 1 }, 1.5, 2) // 5370
+ * Dynamic force WL in N (velocity and service factors in) that brings the tooth to its allowable stress.
+ * WL = Sb F m Y. Source: the Lewis formula solved for the force; Wentzell, Machine Design, Ex. 12.3, p. 258.
+ * @example lewisBeamStrength(150, { faceWidth: 60, module: 5, formFactor: 0.358 }) // 16110
+ */
+export function lewisBeamStrength(
+	allowable: number,
+	tooth: Omit<LewisTooth, 'velocityFactor'>,
+	recorder: Recorder = unrecorded
+): number {
+	return recorder.step(
+		{
+			symbol: 'WL',
+			name: 'dynamic force that the tooth bears in bending',
+			expression: 'Sb · F · m · Y',
+			unit: 'N',
+			source
+		},
+		{ Sb: allowable, F: tooth.faceWidth, m: tooth.module, Y: tooth.formFactor },
+		({ Sb, F, m, Y }) => Sb * F * m * Y
+	);
+}
+
+/**
+ * Tangential force Wp in N that the drive may put on the teeth at the plant's margin: velocity factor Kv, service
+ * factor Ko and the needed margin taken off. Wp = WL / (Mn Ko Kv), WL the dynamic force of the answer that decides.
+ * Source: Wentzell, Machine Design, Ex. 12.5, p. 263.
+ * @example permittedForce(16110, { needed: 2, serviceFactor: 1.5, velocityFactor: 1 }) // 5370
  */
 export function permittedForce(
-	allowable: number,
-	tooth: LewisTooth,
-	serviceFactor: number,
-	needed: number,
+	strength: number,
+	{
+		needed,
+		serviceFactor,
+		velocityFactor
+	}: { needed: number; serviceFactor: number; velocityFactor: number },
 	recorder: Recorder = unrecorded
 ): number {
 	return recorder.step(
 		{
 			symbol: 'Wp',
 			name: "tangential force at the plant's margin",
-			expression: 'Sb · F · m · Y / (Mn · Ko · Kv)',
+			expression: 'WL / (Mn · Ko · Kv)',
 			unit: 'N',
 			source
 		},
-		{
-			Sb: allowable,
-			F: tooth.faceWidth,
-			m: tooth.module,
-			Y: tooth.formFactor,
-			Mn: needed,
-			Ko: serviceFactor,
-			Kv: tooth.velocityFactor
-		},
-		({ Sb, F, m, Y, Mn, Ko, Kv }) => (Sb * F * m * Y) / (Mn * Ko * Kv)
+		{ WL: strength, Mn: needed, Ko: serviceFactor, Kv: velocityFactor },
+		({ WL, Mn, Ko, Kv }) => WL / (Mn * Ko * Kv)
 	);
 }
 

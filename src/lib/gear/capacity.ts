@@ -13,15 +13,15 @@ export interface PermittedPower {
 	low: number;
 }
 
-/** Power that the gear of this check carries at a speed in rpm; null where the method does not reach. */
+/** Power that the gear of this check carries at a speed in rpm; null where the method does not reach, or on a rack. */
 export function permittedPowerAt(input: EvaluateInput, rpm: number): PermittedPower | null {
-	if (!(rpm > 0 && Number.isFinite(rpm))) return null;
+	if (!(rpm > 0 && Number.isFinite(rpm)) || input.gear.kind === 'rack') return null;
 	const drive = { ...input.drive, speed: { value: rpm, unit: 'rpm' as const } };
-	const { figures, marginUncertainty, refusals } = figuresOf({ ...input, drive }, unrecorded);
+	const { figures, uncertainty, refusals } = figuresOf({ ...input, drive }, unrecorded);
 	const middle = figures.permittedPower;
 	// The curve needs no load: it is what a check with an unknown load still can show.
-	if (refusals.some(({ code }) => code !== 'load-unknown') || middle === null || marginUncertainty === null) {
+	if (refusals.some(({ code }) => code !== 'load-unknown') || middle === null || uncertainty === null) {
 		return null;
 	}
-	return Number.isFinite(middle) ? { middle, low: lowEnd(middle, marginUncertainty) } : null;
+	return Number.isFinite(middle) ? { middle, low: lowEnd(middle, uncertainty.badEnd) } : null;
 }

@@ -54,6 +54,10 @@ export interface ToothedPart {
 	/** Degrees at the reference cylinder. */
 	helixAngle?: number | undefined;
 	finish?: Finish | undefined;
+	/** How much of each tooth's height is worn away at the tip (radial). */
+	tipWear?: Quantity<LengthUnit> | undefined;
+	/** Measured arc thickness of a tooth on the reference cylinder, in the normal plane: decides the backlash. */
+	toothThickness?: Quantity<LengthUnit> | undefined;
 }
 
 export interface Gear extends ToothedPart {
@@ -67,6 +71,8 @@ export interface Mate extends Partial<ToothedPart> {
 	faceWidth?: Quantity<LengthUnit> | undefined;
 	material?: Material | undefined;
 	centreDistance?: Quantity<LengthUnit> | undefined;
+	/** Its flanks show wear: a new gear on them is a warning. */
+	worn?: boolean | undefined;
 }
 
 export type Load =
@@ -129,12 +135,32 @@ export interface Reason {
 	values?: Record<string, number | string> | undefined;
 }
 
+/**
+ * One change that helps. A power, speed or face width is solved: where the middle falls short, `value` brings the
+ * deciding answer to the plant's margin, and `carriesAt` does so at the bad end of the uncertainty too; where only
+ * the bad end falls short, both are the latter. A finish or material is one that reaches the plant's margin.
+ */
 export interface Remedy {
 	change: 'power' | 'speed' | 'faceWidth' | 'finish' | 'material';
 	value: Quantity<string> | string;
+	/** The spare then is in this what the original gear was; anything else is a change that needs review. */
 	likeForLike: boolean;
+	/** Margin in bending of this gear with `value` applied. */
 	bendingMargin: number;
+	bendingMarginLow: number;
+	carriesAt: Quantity<string> | string | null;
 }
+
+/** One answer of the pair: what the margin is, at the middle and at the bad end, and what the plant needs. */
+export interface Limit {
+	answer: LimitName;
+	margin: number;
+	marginLow: number;
+	needed: number;
+}
+
+/** Wear is one answer of both flanks: its published limit goes by the mean hardness of the pair. */
+export type LimitName = 'gear-bending' | 'mate-bending' | 'wear';
 
 /** One line of the working: `expression` carries the symbols, `numbers` the same with figures put in. */
 export interface WorkingLine {
@@ -145,13 +171,17 @@ export interface WorkingLine {
 	value: number;
 	unit: string;
 	source: string;
+	/** Whose figure it is, where it is not this gear's. */
+	of?: 'mate' | undefined;
 }
 
 export interface Outcome {
 	/** Version of the calculation core that answered. */
 	core: string;
 	pitchDiameter: number | null;
+	/** In the transverse plane, as `pitchDiameter` = `module` x teeth; `normalModule` is what the cutter had. */
 	module: number | null;
+	normalModule: number | null;
 	diametralPitch: number | null;
 	circularPitch: number | null;
 	pitchLineVelocity: number | null;
@@ -161,14 +191,20 @@ export interface Outcome {
 	formFactorSource: 'handbook' | 'geometry' | null;
 	formFactorHandbook: number | null;
 	formFactorGeometry: number | null;
+	/** Dolan and Broghamer's factor at the fillet. For information: it is in no stress and no verdict. */
+	stressConcentration: number | null;
 	tangentialForce: number | null;
 	designForce: number | null;
 	bendingStress: number | null;
 	allowableBending: number | null;
 	bendingMargin: number | null;
 	bendingMarginLow: number | null;
+	/** What this gear's drive may carry at the plant's margins: the lowest of all answers that were computed. */
 	permittedPower: number | null;
 	permittedTorque: number | null;
+	/** The answers that were computed, and which of them decides: the least of what the plant needs. */
+	limits: Limit[];
+	limitedBy: LimitName | null;
 	wear: null | {
 		contactStress: number;
 		allowableContact: number;
@@ -178,15 +214,20 @@ export interface Outcome {
 	};
 	mateBending: null | { bendingStress: number; allowableBending: number; bendingMargin: number };
 	mesh: null | {
-		ratio: number;
-		standardCentreDistance: number;
+		/** Teeth of the larger over teeth of the smaller; null with a rack, as is the centre distance. */
+		ratio: number | null;
+		standardCentreDistance: number | null;
+		/** Transverse, degrees. */
 		operatingPressureAngle: number;
+		/** In the transverse plane; `overlapRatio` is what a helix adds. */
 		contactRatio: number;
+		overlapRatio: number;
 		normalBacklash: number | null;
 		huntingTooth: boolean;
 		undercut: { gear: boolean; mate: boolean };
 		interference: boolean;
 	};
+	/** Spare over original at the same drive. */
 	original: null | { bendingCapacityRatio: number; wearCapacityRatio: number | null };
 	verdict: Verdict;
 	reasons: Reason[];

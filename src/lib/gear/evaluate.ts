@@ -2,41 +2,54 @@
  * The question and its answer: `evaluate` of the calculation contract. Pure: the same input gives the same outcome
  * on the tablet, on the server and from a shell. It never throws for an input that the schema lets through.
  */
+import { compareWithOriginal } from './comparison';
 import type { EvaluateInput, Outcome } from './contract';
 import { figuresOf, type Figures } from './figures';
-import { rulesOf } from './rules';
-import { cannotSay, OUT_OF_RANGE, verdictOf } from './verdict';
+import { remediesFor } from './remedies';
+import { OUT_OF_RANGE } from './refusals';
+import { verdictOf } from './verdict';
+import { CORE_VERSION } from './version';
 import { Working } from './working';
 
 /** Figures in mm, N, MPa, W, N·m and m/s; what could not be worked out is null and has its reason. */
 export function evaluate(input: EvaluateInput): Outcome {
 	const working = new Working();
-	const { figures: computed, refusals } = figuresOf(input, working);
-	const figures = finiteOnly(computed);
-	const overflowed = Object.values(computed).some(
-		(value) => typeof value === 'number' && !Number.isFinite(value)
-	);
-	const { name, permitted } = input.gear.material;
+	const answer = figuresOf(input, working);
+	const { figures, overflowed } = finiteOnly(answer.figures);
+	const { original, reasons: compared } = compareWithOriginal(input, answer, working);
+	const judged = verdictOf({
+		permitted: input.gear.material.permitted,
+		materialName: input.gear.material.name,
+		limits: figures.limits,
+		refusals: overflowed ? [...answer.refusals, OUT_OF_RANGE] : answer.refusals,
+		reviews: answer.reviews,
+		warnings: [...compared, ...answer.warnings]
+	});
 	return {
-		...cannotSay([]),
+		core: CORE_VERSION,
 		...figures,
-		formFactorSource: figures.formFactor === null ? null : 'handbook',
-		...verdictOf({
-			permitted,
-			materialName: name,
-			refusals: overflowed ? [...refusals, OUT_OF_RANGE] : refusals,
-			margin: figures.bendingMargin,
-			low: figures.bendingMarginLow,
-			needed: rulesOf(input.rules).bendingMargin
-		}),
+		original,
+		...judged,
+		remedies: remediesFor(input, answer, judged.verdict),
 		working: working.lines
 	};
 }
 
-function finiteOnly(figures: Figures): Figures {
-	const checked = { ...figures };
-	for (const name of Object.keys(checked) as (keyof Figures)[]) {
-		if (name !== 'velocityLaw' && !Number.isFinite(checked[name])) checked[name] = null;
-	}
-	return checked;
+/** Figures that left the range of numbers become null, a group of them as a whole. */
+function finiteOnly(figures: Figures): { figures: Figures; overflowed: boolean } {
+	let overflowed = false;
+	const kept = Object.entries(figures).map(([name, value]: [string, unknown]) => {
+		if (isFiniteThroughout(value)) return [name, value];
+		overflowed = true;
+		return [name, Array.isArray(value) ? [] : null];
+	});
+	return overflowed
+		? { figures: { ...(Object.fromEntries(kept) as Figures), limits: [], limitedBy: null }, overflowed }
+		: { figures, overflowed };
+}
+
+function isFiniteThroughout(value: unknown): boolean {
+	if (typeof value === 'number') return Number.isFinite(value);
+	if (typeof value !== 'object' || value === null) return true;
+	return Object.values(value).every(isFiniteThroughout);
 }

@@ -1,65 +1,39 @@
 /**
  * Every figure of one gear in one drive that the input allows, in the order of a hand calculation. What cannot be
- * computed is null and has its refusal. `evaluate` and the capacity curve both come through here.
+ * computed is null and has its reason. `evaluate`, the capacity curve, the comparison and the remedies all come
+ * through here.
  */
-import type { EvaluateInput, Gear, Mate, Outcome, Reason, Rules } from './contract';
-import {
-	bendingMargin,
-	lewisBendingStress,
-	permittedForce,
-	permittedPowerOf,
-	permittedTorqueOf,
-	reversingAllowable,
-	type LewisTooth
-} from './bending';
-import { handbookRefusal, lewisFormFactor } from './form-factor';
-import { designForce, tangentialForce } from './load';
-import { circularPitchOf, diametralPitchOf, moduleOf, pitchDiameter } from './pitch';
-import { formRuleRefusal, kindRefusal, mateRefusal, missingRefusals, speedRefusal } from './refusals';
+import type { EvaluateInput, Gear, Limit, LimitName, Mate, Outcome, Reason, Rules } from './contract';
+import { permittedForce, permittedPowerOf, permittedTorqueOf } from './bending';
+import { driveOf, type DriveFigures } from './drive';
+import { memberOf } from './member';
+import { pairOf } from './pair';
+import { circularPitchOf, diametralPitchOf, pitchDiameter } from './pitch';
+import { kindReview, missingRefusals } from './refusals';
 import { rulesOf, uncertaintyOf } from './rules';
 import { SOURCES } from './sources';
-import { lowEnd, stressUncertainty } from './uncertainty';
-import {
-	barthVelocityFactor,
-	pitchLineVelocity,
-	velocityEnd,
-	velocityFactorShare,
-	velocityLawOf
-} from './velocity';
+import { formFactorOf, memberBending } from './strength';
+import { isPower, lowEnd, marginUncertainty, type MarginUncertainty } from './uncertainty';
+import { velocityFactorShare, type VelocityLaw } from './velocity';
 import type { Recorder } from './working';
 
 /** The part of the outcome that is worked out here; names and units as there. */
-export type Figures = Pick<
-	Outcome,
-	| 'pitchDiameter'
-	| 'module'
-	| 'diametralPitch'
-	| 'circularPitch'
-	| 'pitchLineVelocity'
-	| 'velocityLaw'
-	| 'velocityFactor'
-	| 'formFactor'
-	| 'formFactorHandbook'
-	| 'tangentialForce'
-	| 'designForce'
-	| 'bendingStress'
-	| 'allowableBending'
-	| 'bendingMargin'
-	| 'bendingMarginLow'
-	| 'permittedPower'
-	| 'permittedTorque'
->;
+export type Figures = Omit<Outcome, 'core' | 'original' | 'verdict' | 'reasons' | 'remedies' | 'working'>;
 
 export const NO_FIGURES: Figures = {
 	pitchDiameter: null,
 	module: null,
+	normalModule: null,
 	diametralPitch: null,
 	circularPitch: null,
 	pitchLineVelocity: null,
 	velocityLaw: null,
 	velocityFactor: null,
 	formFactor: null,
+	formFactorSource: null,
 	formFactorHandbook: null,
+	formFactorGeometry: null,
+	stressConcentration: null,
 	tangentialForce: null,
 	designForce: null,
 	bendingStress: null,
@@ -67,92 +41,160 @@ export const NO_FIGURES: Figures = {
 	bendingMargin: null,
 	bendingMarginLow: null,
 	permittedPower: null,
-	permittedTorque: null
+	permittedTorque: null,
+	limits: [],
+	limitedBy: null,
+	wear: null,
+	mateBending: null,
+	mesh: null
 };
+
+/** A dynamic force in N (velocity and service factors in) that one of the pair's answers bears, and its margin. */
+export interface Strength {
+	answer: LimitName;
+	force: number;
+	needed: number;
+}
 
 export interface FiguresAnswer {
 	figures: Figures;
-	/** Relative standard uncertainty of stress and margin. */
-	marginUncertainty: number | null;
+	law: VelocityLaw;
+	strengths: Strength[];
+	uncertainty: MarginUncertainty | null;
+	/** Make it `cannot-say`. */
 	refusals: Reason[];
+	/** Send it to review at best. */
+	reviews: Reason[];
+	/** Are told, and change no verdict. */
+	warnings: Reason[];
 }
 
 export function figuresOf(input: EvaluateInput, recorder: Recorder): FiguresAnswer {
 	const { gear, mate, drive } = input;
 	const rules = rulesOf(input.rules);
-	const kind = kindRefusal(gear);
-	if (kind) return { figures: NO_FIGURES, marginUncertainty: null, refusals: [kind] };
 
-	const figures = { ...NO_FIGURES };
-	const refusals: (Reason | null)[] = [
-		mateRefusal(gear, mate),
-		...missingRefusals(input),
-		formRuleRefusal(rules)
-	];
-	const answer = (marginUncertainty: number | null = null): FiguresAnswer => ({
-		figures,
-		marginUncertainty,
-		refusals: refusals.filter((reason) => reason !== null)
-	});
-
-	const module = moduleOf(gear.pitch, recorder);
-	figures.module = module;
-	figures.diametralPitch = diametralPitchOf(module);
-	figures.circularPitch = circularPitchOf(module);
-	if (gear.teeth === undefined) return answer();
-	const diameter = pitchDiameter(module, gear.teeth, recorder);
-	figures.pitchDiameter = diameter;
-
-	const velocity = drive.speed
-		? pitchLineVelocity(
-				diameter,
-				recorder.given({ symbol: 'n', name: 'speed of this gear', unit: 'rpm' }, drive.speed),
-				recorder
-			)
-		: null;
-	figures.pitchLineVelocity = velocity;
-	figures.tangentialForce = tangentialForce(drive.load, diameter, velocity, recorder);
-	if (figures.tangentialForce !== null) {
-		figures.designForce = designForce(figures.tangentialForce, drive.serviceFactor, recorder);
-	}
-
-	const law = velocityLawOf(gear.finish, gear.material.metallic, rules.cutLaw);
-	figures.velocityLaw = law;
-	if (velocity !== null) {
-		const end = velocityEnd(law, gear.finish, rules.speedLimit);
-		const byPlant = rules.speedLimit[gear.finish] !== null;
-		const tooFast = speedRefusal(velocity, end, { law, finish: gear.finish, byPlant });
-		refusals.push(tooFast);
-		if (!tooFast) figures.velocityFactor = barthVelocityFactor(velocity, law, recorder);
-	}
-
-	const tooth = { ...gear, teeth: gear.teeth };
-	const notInTable = handbookRefusal(tooth);
-	if (rules.formFactor === 'handbook') refusals.push(notInTable);
-	if (!notInTable) {
-		figures.formFactorHandbook = lewisFormFactor(tooth, recorder);
-		if (rules.formFactor === 'handbook') figures.formFactor = figures.formFactorHandbook;
-	}
+	const member = memberOf(gear, recorder);
+	const size = {
+		module: member.transverseModule,
+		normalModule: member.normalModule,
+		diametralPitch: diametralPitchOf(member.transverseModule),
+		circularPitch: circularPitchOf(member.transverseModule),
+		pitchDiameter:
+			member.teeth === null ? null : pitchDiameter(member.transverseModule, member.teeth, recorder)
+	};
+	const onPitchLine = driveOf(gear, member, { drive, rules }, recorder);
+	const { velocityFactor, designForce } = onPitchLine.figures;
+	const hasTeeth = gear.kind === 'rack' || member.teeth !== null;
+	const form = hasTeeth ? formFactorOf(member, gear.form, rules.formFactor, recorder) : null;
 
 	const faceWidth = smallerFaceWidth(gear, mate, recorder);
-	const allowable = allowableBending(gear, drive.bending === 'reversing', rules, recorder);
-	figures.allowableBending = allowable;
+	const bending = memberBending(
+		{ member, material: gear.material, faceWidth, formFactor: form?.figures.formFactor ?? null },
+		{ rules, reversing: drive.bending === 'reversing', designForce, velocityFactor },
+		recorder
+	);
+	const pair = pairOf({ input, rules, gear: member, faceWidth, velocityFactor, designForce }, recorder);
 
-	const { formFactor, velocityFactor } = figures;
-	if (formFactor === null || velocityFactor === null || velocity === null) return answer();
-	const lewis: LewisTooth = { faceWidth, module, formFactor, velocityFactor };
+	const strengths = [
+		{ answer: 'gear-bending', force: bending.strength, needed: rules.bendingMargin },
+		{ answer: 'wear', force: pair.wearStrength, needed: rules.wearMargin },
+		{ answer: 'mate-bending', force: pair.mateStrength, needed: rules.bendingMargin }
+	].filter((strength): strength is Strength => strength.force !== null);
+	const figures = {
+		...NO_FIGURES,
+		...size,
+		...onPitchLine.figures,
+		...form?.figures,
+		...bending.figures,
+		...pair.figures
+	};
+	const uncertainty = uncertaintyAt(input, onPitchLine.figures, recorder);
+	const review = kindReview(gear.kind, mate?.kind);
+	return {
+		figures: {
+			...figures,
+			...marginsOf(figures, rules, uncertainty, recorder),
+			...permittedOf(strengths, figures, drive.serviceFactor, recorder)
+		},
+		law: onPitchLine.figures.velocityLaw,
+		strengths,
+		uncertainty,
+		refusals: [
+			...pair.refusals,
+			...missingRefusals(input),
+			...[onPitchLine.refusal, form?.refusal ?? null].filter((reason) => reason !== null)
+		],
+		reviews: review ? [review, ...pair.reviews] : pair.reviews,
+		warnings: pair.warnings
+	};
+}
 
-	const share = velocityFactorShare(velocity, law, recorder);
-	const uncertainty = stressUncertainty(uncertaintyOf(input.uncertainty), drive.load, share, recorder);
-	if (figures.designForce !== null) {
-		figures.bendingStress = lewisBendingStress(figures.designForce, lewis, recorder);
-		figures.bendingMargin = bendingMargin(allowable, figures.bendingStress, recorder);
-		figures.bendingMarginLow = lowEnd(figures.bendingMargin, uncertainty, recorder);
+function uncertaintyAt(
+	{ drive, uncertainty }: EvaluateInput,
+	{ pitchLineVelocity, velocityFactor, velocityLaw }: DriveFigures,
+	recorder: Recorder
+): MarginUncertainty | null {
+	if (pitchLineVelocity === null || velocityFactor === null) return null;
+	const share = velocityFactorShare(pitchLineVelocity, velocityLaw, recorder);
+	return marginUncertainty(uncertaintyOf(uncertainty), isPower(drive.load), share, recorder);
+}
+
+function marginsOf(
+	figures: Figures,
+	rules: Rules,
+	uncertainty: MarginUncertainty | null,
+	recorder: Recorder
+): Pick<Figures, 'bendingMarginLow' | 'limits' | 'limitedBy'> {
+	if (!uncertainty) return { bendingMarginLow: null, limits: [], limitedBy: null };
+	const { badEnd } = uncertainty;
+	const limits = limitsOf(figures, rules, badEnd);
+	return {
+		bendingMarginLow: figures.bendingMargin === null ? null : lowEnd(figures.bendingMargin, badEnd, recorder),
+		limits,
+		limitedBy: decidingOf(limits)?.answer ?? null
+	};
+}
+
+/** Where the gear's own teeth cannot be judged, nothing can be stated of the pair. */
+function permittedOf(
+	strengths: Strength[],
+	{ velocityFactor, pitchLineVelocity: velocity, pitchDiameter: diameter }: Figures,
+	serviceFactor: number,
+	recorder: Recorder
+): Pick<Figures, 'permittedPower' | 'permittedTorque'> {
+	const weakest = leastOf(strengths, ({ force, needed }) => force / needed);
+	const judged = strengths.some(({ answer }) => answer === 'gear-bending');
+	if (!weakest || !judged || velocityFactor === null || velocity === null) {
+		return { permittedPower: null, permittedTorque: null };
 	}
-	const force = permittedForce(allowable, lewis, drive.serviceFactor, rules.bendingMargin, recorder);
-	figures.permittedPower = permittedPowerOf(force, velocity, recorder);
-	figures.permittedTorque = permittedTorqueOf(force, diameter, recorder);
-	return answer(uncertainty);
+	const factors = { needed: weakest.needed, serviceFactor, velocityFactor };
+	const force = permittedForce(weakest.force, factors, recorder);
+	return {
+		permittedPower: permittedPowerOf(force, velocity, recorder),
+		permittedTorque: diameter === null ? null : permittedTorqueOf(force, diameter, recorder)
+	};
+}
+
+/** The answer with the least of what it needs: it decides. */
+export function decidingOf(limits: Limit[]): Limit | null {
+	return leastOf(limits, ({ margin, needed }) => margin / needed);
+}
+
+function leastOf<T>(of: T[], measure: (one: T) => number): T | null {
+	return of.reduce<T | null>((found, one) => (found && measure(found) <= measure(one) ? found : one), null);
+}
+
+/** Wear is limited twice, by Hertz and by Buckingham: the lower margin counts. */
+function limitsOf({ bendingMargin, wear, mateBending }: Figures, needed: Rules, badEnd: number): Limit[] {
+	const limit = (answer: LimitName, margin: number | undefined | null, needed: number): Limit[] =>
+		margin === undefined || margin === null
+			? []
+			: [{ answer, margin, marginLow: lowEnd(margin, badEnd), needed }];
+	return [
+		...limit('gear-bending', bendingMargin, needed.bendingMargin),
+		...limit('wear', wear && Math.min(wear.contactMargin, wear.wearLoadMargin), needed.wearMargin),
+		...limit('mate-bending', mateBending?.bendingMargin, needed.bendingMargin)
+	];
 }
 
 /** The load is carried only where both gears have teeth: the smaller face width counts. */
@@ -172,11 +214,4 @@ function smallerFaceWidth(gear: Gear, mate: Mate | undefined, recorder: Recorder
 		{ F1: own, F2: mates },
 		({ F1, F2 }) => Math.min(F1, F2)
 	);
-}
-
-function allowableBending(gear: Gear, reversing: boolean, rules: Rules, recorder: Recorder): number {
-	const symbol = reversing ? 'Sa' : 'Sb';
-	const line = { symbol, name: 'allowable bending stress of the material', unit: 'MPa' };
-	const allowable = recorder.given(line, gear.material.allowableBending);
-	return reversing ? reversingAllowable(allowable, rules.reversingFactor, recorder) : allowable;
 }

@@ -1,6 +1,7 @@
 /**
- * The Lewis form factor Y: how much of the load's force a tooth's shape turns into stress at its root, load at the
- * tip. This part knows the handbook table: full depth at 14.5 and 20 degrees, stub at 20 degrees, no shift.
+ * The Lewis form factor Y by the handbook table: how much of the load's force a tooth's shape turns into stress at its
+ * root, load at the tip. Full depth at 14.5 and 20 degrees, stub at 20 degrees, no shift; every other tooth goes by
+ * its geometry (form-factor-geometry.ts).
  */
 import type { Reason, ToothForm } from './contract';
 import { SOURCES } from './sources';
@@ -16,59 +17,56 @@ import { unrecorded, type Recorder } from './working';
 /** Fewest teeth in the table; below, the fillet is undercut and the method ends. */
 export const FEWEST_TEETH = 10;
 
-/** What the table is asked for. Angle in degrees, shift in modules. */
+/**
+ * What the table is asked for: teeth (virtual ones of a helical gear, Infinity for a rack), normal pressure angle in
+ * degrees, shift in modules, and whether the tips are worn.
+ */
 export interface TableTooth {
 	teeth: number;
 	pressureAngle: number;
 	form: ToothForm;
 	profileShift?: number | undefined;
+	tipWorn?: boolean | undefined;
 }
 
 const line = {
-	symbol: 'Y',
-	name: 'Lewis form factor, load at the tip',
+	symbol: 'Yh',
+	name: 'Lewis form factor by the handbook, load at the tip',
 	unit: '1',
 	source: SOURCES.lewisTable
 };
 
-/** Why the table cannot answer for this tooth; null when it can. */
-export function handbookRefusal({ teeth, pressureAngle, form, profileShift = 0 }: TableTooth): Reason | null {
-	if (profileShift !== 0) {
-		return {
-			code: 'profile-shift-not-covered',
-			text: `The handbook table holds teeth without profile shift, this gear has ${profileShift} x module. Check the shift, or have the gear rated by an engineer.`,
-			values: { profileShift }
-		};
-	}
-	if (!columnOf(pressureAngle, form)) {
-		return {
-			code: 'form-not-in-table',
-			text: `The handbook table holds full depth at 14.5 and 20 degrees and stub at 20 degrees, not ${formWords(form)} at ${pressureAngle} degrees. Check angle and form, or have the gear rated by an engineer.`,
-			values: { pressureAngle }
-		};
-	}
-	if (!(teeth >= FEWEST_TEETH)) {
-		return {
-			code: 'too-few-teeth',
-			text: `The Lewis method starts at ${FEWEST_TEETH} teeth, this gear has ${teeth}. Count again, or have the gear rated by an engineer.`,
-			values: { teeth, fewest: FEWEST_TEETH }
-		};
-	}
-	return null;
+/** The Lewis method ends below ten teeth, by table and by geometry alike. */
+export function fewTeethRefusal(teeth: number): Reason | null {
+	if (teeth >= FEWEST_TEETH) return null;
+	return {
+		code: 'too-few-teeth',
+		text: `The Lewis method starts at ${FEWEST_TEETH} teeth, this gear has ${teeth}. Count again, or have the gear rated by an engineer.`,
+		values: { teeth, fewest: FEWEST_TEETH }
+	};
+}
+
+/** Whether the table holds this tooth: one of its three forms, whole, not shifted, of ten teeth or more. */
+export function handbookHolds(tooth: TableTooth): boolean {
+	const { teeth, pressureAngle, form, profileShift = 0, tipWorn = false } = tooth;
+	return !tipWorn && profileShift === 0 && teeth >= FEWEST_TEETH && columnOf(pressureAngle, form) !== null;
 }
 
 /**
  * Lewis form factor Y (for diametral pitch or module), load at the tip, from the handbook table; between two
- * entries linear in 1/N, the rack at 1/N = 0. Throws a RangeError with the sentence of `handbookRefusal` for a
- * tooth that the table does not hold.
+ * entries linear in 1/N, the rack at 1/N = 0. Throws a RangeError for a tooth that the table does not hold
+ * (`handbookHolds` tells).
  * Source: Faires, Design of Machine Elements, 4th ed., form-factor table (edition from memory).
  * @example lewisFormFactor({ teeth: 24, pressureAngle: 14.5, form: 'full-depth' }) // 0.302
  * @example lewisFormFactor({ teeth: 48, pressureAngle: 14.5, form: 'full-depth' }) // 0.34375
  */
 export function lewisFormFactor(tooth: TableTooth, recorder: Recorder = unrecorded): number {
 	const column = columnOf(tooth.pressureAngle, tooth.form);
-	const refusal = handbookRefusal(tooth);
-	if (refusal || !column) throw new RangeError(refusal?.text);
+	if (!column || !handbookHolds(tooth)) {
+		throw new RangeError('The handbook table does not hold this tooth: see handbookHolds.');
+	}
+	if (tooth.teeth === Infinity)
+		return recorder.step({ ...line, expression: 'table, rack' }, {}, () => column.rack);
 
 	const { below, above } = neighbours(column, tooth.teeth);
 	if (below.N === tooth.teeth) {
@@ -101,8 +99,4 @@ function neighbours({ Y, rack }: LewisColumn, teeth: number): { below: Entry; ab
 	const last = next === -1 ? LEWIS_TEETH.length - 1 : next - 1;
 	const entry = (i: number): Entry => ({ N: LEWIS_TEETH[i] ?? Infinity, Y: Y[i] ?? rack });
 	return { below: entry(last), above: entry(last + 1) };
-}
-
-function formWords(form: ToothForm): string {
-	return form === 'full-depth' ? 'full depth' : form === 'stub' ? 'stub' : 'a form given by its rack';
 }

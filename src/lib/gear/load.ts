@@ -10,7 +10,7 @@ import { unrecorded, type Recorder } from './working';
 const line = { symbol: 'Wt', name: 'tangential force', unit: 'N', source: SOURCES.mechanics };
 
 /**
- * Tangential force Wt in N; null where the load is unknown or the velocity it needs is.
+ * Tangential force Wt in N; null where the load is unknown, or the velocity of a power or the diameter of a torque is.
  * Wt = P / V (W, m/s), Wt = 2000 T / d (N·m, mm), or as given.
  * Source: mechanics; Wentzell, Machine Design, Ex. 12.1, p. 254 and Ex. 12.6, p. 266.
  * @example tangentialForce({ torque: { value: 100, unit: 'N*m' } }, 200, null) // 1000
@@ -18,7 +18,7 @@ const line = { symbol: 'Wt', name: 'tangential force', unit: 'N', source: SOURCE
  */
 export function tangentialForce(
 	load: Load,
-	diameter: number,
+	diameter: number | null,
 	velocity: number | null,
 	recorder: Recorder = unrecorded
 ): number | null {
@@ -27,6 +27,7 @@ export function tangentialForce(
 		return recorder.given({ symbol: 'Wt', name: 'tangential force', unit: 'N' }, load.tangentialForce);
 	}
 	if ('torque' in load) {
+		if (diameter === null) return null;
 		const torque = recorder.given({ symbol: 'T', name: 'torque on this gear', unit: 'N·m' }, load.torque);
 		return recorder.step(
 			{ ...line, expression: '2000 · T / d' },

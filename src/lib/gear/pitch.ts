@@ -65,12 +65,3 @@ export function pitchDiameter(module: number, teeth: number, recorder: Recorder 
 		({ m, N }) => m * N
 	);
 }
-
-/**
- * Base pitch in mm, which two gears must share to mesh. pb = π m cos α (α in degrees).
- * Source: involute geometry; Shigley, Mechanical Engineering Design, 8th ed., ch. 13 (edition from memory).
- * @example basePitch(3, 20) // 8.8564
- */
-export function basePitch(module: number, pressureAngle: number): number {
-	return Math.PI * module * Math.cos((pressureAngle * Math.PI) / 180);
-}

@@ -1,53 +1,24 @@
 /**
- * What the core cannot answer yet, or not from what was given. Each refusal is a coded reason whose sentence says
- * what is missing and what to do; `figures.ts` leaves the figures out that would need it.
+ * What cannot be answered from what was given, and what sends an answer to review. Each is a coded reason whose
+ * sentence says what is missing and what to do; `figures.ts` leaves out the figures that would need it.
  */
-import type { EvaluateInput, Finish, Gear, Mate, Reason, Rules } from './contract';
-import { basePitch, moduleOf } from './pitch';
+import type { EvaluateInput, Finish, GearKind, Reason } from './contract';
 import { fromSI } from './quantity';
 import type { VelocityLaw } from './velocity';
 
-/** Two gears of the same standard pitch agree far better than this, two of neighbouring pitches far worse. */
-const SAME_BASE_PITCH = 0.002;
-
-export function kindRefusal({ kind, helixAngle = 0 }: Gear): Reason | null {
-	if (kind === 'spur' && helixAngle === 0) return null;
-	const words = kind === 'spur' ? 'spur gear with a helix angle' : kind === 'rack' ? 'rack' : `${kind} gear`;
-	return {
-		code: 'kind-not-covered',
-		text: `This version works out spur gears, not a ${words}. Have it rated by an engineer.`,
-		values: { kind }
-	};
-}
-
-export function formRuleRefusal({ formFactor }: Rules): Reason | null {
-	if (formFactor === 'handbook') return null;
-	return {
-		code: 'form-rule-not-covered',
-		text: `The plant's rule asks for the form factor by ${formFactor === 'geometry' ? 'geometry' : 'the lower of both methods'}; this version has the handbook table only. A supervisor can set the rule to the handbook table.`,
-		values: { formFactor }
-	};
-}
-
-/** A mate of another base pitch does not mesh, whatever the strength: that comes before any margin. */
-export function mateRefusal(gear: Gear, mate: Mate | undefined): Reason | null {
-	if (!mate?.pitch) return null;
-	const own = basePitch(moduleOf(gear.pitch), gear.pressureAngle);
-	const mates = basePitch(moduleOf(mate.pitch), mate.pressureAngle ?? gear.pressureAngle);
-	if (Math.abs(mates / own - 1) <= SAME_BASE_PITCH) return null;
-	return {
-		code: 'mate-pitch-differs',
-		text: `Gear and mate do not mesh: their base pitches are ${own.toFixed(3)} mm and ${mates.toFixed(3)} mm. Check pitch and pressure angle of both.`,
-		values: { gear: own, mate: mates }
-	};
-}
-
 export function missingRefusals({ gear, drive }: EvaluateInput): Reason[] {
 	const reasons: Reason[] = [];
-	if (gear.teeth === undefined) {
+	const rack = gear.kind === 'rack';
+	if (!rack && gear.teeth === undefined) {
 		reasons.push({ code: 'teeth-missing', text: 'The number of teeth is missing. Count them and give it.' });
 	}
-	if (drive.speed === undefined) {
+	if (rack && drive.velocity === undefined) {
+		reasons.push({
+			code: 'velocity-missing',
+			text: 'The velocity of the rack is missing. Give it in m/s or ft/min.'
+		});
+	}
+	if (!rack && drive.speed === undefined) {
 		reasons.push({ code: 'speed-missing', text: 'The speed of this gear is missing. Give it in rpm.' });
 	}
 	if (drive.load === 'unknown') {
@@ -55,8 +26,25 @@ export function missingRefusals({ gear, drive }: EvaluateInput): Reason[] {
 			code: 'load-unknown',
 			text: 'The load is not known, so there is no stress to compare. Give power or torque, from the nameplate or measured.'
 		});
+	} else if (rack && 'torque' in drive.load) {
+		reasons.push({
+			code: 'torque-on-rack',
+			text: 'A rack turns no shaft, so a torque gives no force on it. Give the power, or the force along the rack.'
+		});
 	}
 	return reasons;
+}
+
+/** What the method knows only as a lower bound, or only for the common case, goes to review at best. */
+export function kindReview(gear: GearKind, mate: GearKind | undefined): Reason | null {
+	const kind = gear !== 'spur' ? gear : mate;
+	if (kind === undefined || kind === 'spur') return null;
+	const words = kind === 'rack' ? 'a rack' : kind === 'internal' ? 'an internal gear' : 'a helical gear';
+	return {
+		code: 'kind-needs-review',
+		text: `The method is for spur gears; for ${words} it gives a first look only. An engineer should review it.`,
+		values: { kind }
+	};
 }
 
 const FINISH_WORDS: Record<Finish, string> = {
@@ -87,3 +75,8 @@ export function speedRefusal(
 function velocities(velocity: number): string {
 	return `${velocity.toFixed(2)} m/s (${Math.round(fromSI(velocity, 'ft/min'))} ft/min)`;
 }
+
+export const OUT_OF_RANGE: Reason = {
+	code: 'out-of-range',
+	text: 'These values lead to a figure too large or too small to compute with. Check the readings and their units.'
+};

@@ -15,6 +15,17 @@ export const SOURCES = {
 	lewisTable: 'Faires, Design of Machine Elements, 4th ed., form-factor table (edition from memory)',
 	lewis:
 		'Lewis bending stress; Shigley, Mechanical Engineering Design, 8th ed., ch. 14 (edition from memory)',
+	generatedTooth: 'Lewis parabola on the generated tooth; as in the AGMA 225 tables (from memory)',
+	stressConcentration: 'Dolan and Broghamer (1942); AGMA 908-B89 (from memory)',
+	hertz:
+		'contact stress by Hertz; Shigley, Mechanical Engineering Design, 8th ed., sec. 14-2 (edition from memory)',
+	buckingham:
+		"Buckingham's limit load for wear; Buckingham, Analytical Mechanics of Gears (edition from memory)",
+	mesh: 'involute geometry; Shigley, Mechanical Engineering Design, 8th ed., ch. 13 (edition from memory)',
+	span: 'span over teeth; ISO/TR 10064-2; DIN 3960 (from memory)',
+	overPins: "measurement over wires; Machinery's Handbook (from memory)",
+	definition: 'definition',
+	commonPractice: 'common practice',
 	plantRule: 'rule of the plant',
 	propagation: 'first-order propagation; JCGM 100:2008, 5.1.2; 95 % one-sided, normal distribution'
 } as const;

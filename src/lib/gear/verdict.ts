@@ -1,9 +1,10 @@
 /**
  * From figures to a verdict with its reasons. Material not permitted comes first, then what cannot be said, then
- * the margin; a verdict is never better than what was worked out supports.
+ * the answer that decides; a verdict is never better than what was worked out supports.
  */
-import type { Outcome, Reason, Verdict } from './contract';
-import { NO_FIGURES } from './figures';
+import type { Limit, LimitName, Outcome, Reason, Verdict } from './contract';
+import { decidingOf, NO_FIGURES } from './figures';
+import { OUT_OF_RANGE } from './refusals';
 import { CORE_VERSION } from './version';
 
 export interface VerdictAnswer {
@@ -14,14 +15,21 @@ export interface VerdictAnswer {
 export interface VerdictQuestion {
 	permitted: boolean;
 	materialName: string;
+	limits: Limit[];
+	/** Make it `cannot-say`. */
 	refusals: Reason[];
-	margin: number | null;
-	low: number | null;
-	needed: number;
+	/** Send it to review at best. */
+	reviews: Reason[];
+	/** Are told beside every verdict that has figures. */
+	warnings: Reason[];
 }
 
 /** A margin set to the needed one by arithmetic (a permitted power, a remedy) meets it. */
 const ROUNDING = 1e-9;
+
+export function meets(margin: number, needed: number): boolean {
+	return margin >= needed * (1 - ROUNDING);
+}
 
 /** Verdict and reasons; the first reason is the one that decided. */
 export function verdictOf(question: VerdictQuestion): VerdictAnswer {
@@ -37,31 +45,81 @@ export function verdictOf(question: VerdictQuestion): VerdictAnswer {
 	return { verdict: 'not-permitted', reasons: [notPermitted, ...others] };
 }
 
-function judge({ refusals, margin, low, needed }: VerdictQuestion): VerdictAnswer {
-	if (refusals.length > 0) return { verdict: 'cannot-say', reasons: refusals };
-	if (margin === null || low === null) return { verdict: 'cannot-say', reasons: [OUT_OF_RANGE] };
+function judge({ limits, refusals, reviews, warnings }: VerdictQuestion): VerdictAnswer {
+	if (refusals.length > 0) return { verdict: 'cannot-say', reasons: [...refusals, ...warnings] };
+	const deciding = decidingOf(limits);
+	if (!deciding) return { verdict: 'cannot-say', reasons: [OUT_OF_RANGE, ...warnings] };
 
+	const { margin, marginLow: low, needed } = deciding;
+	const say = SENTENCES[deciding.answer];
 	const values = { margin, low, needed };
 	if (!meets(margin, needed)) {
-		const text = `The margin in bending is ${shown(margin)}, the plant needs ${needed}: this gear falls short.`;
-		return { verdict: 'will-not-carry', reasons: [{ code: 'bending-margin-short', text, values }] };
+		const text = `The margin in ${say.of} is ${shown(margin)}, the plant needs ${needed}: ${say.short}.`;
+		const short = { code: say.codes.short, text, values };
+		return { verdict: 'will-not-carry', reasons: [short, ...reviews, ...warnings] };
 	}
+	const scope = scopeOf(limits);
 	if (!meets(low, needed)) {
-		const text = `The margin in bending is ${shown(margin)} and meets the needed ${needed}, but at the bad end of the uncertainty it is ${shown(low)}.`;
-		return { verdict: 'close', reasons: [{ code: 'bending-margin-low', text, values }, BENDING_ONLY] };
+		const text = `The margin in ${say.of} is ${shown(margin)} and meets the needed ${needed}, but at the bad end of the uncertainty it is ${shown(low)}.`;
+		const close = { code: say.codes.low, text, values };
+		return { verdict: 'close', reasons: [close, ...reviews, ...scope, ...warnings] };
 	}
-	const text = `The margin in bending is ${shown(margin)}, and ${shown(low)} at the bad end of the uncertainty; the plant needs ${needed}.`;
-	return { verdict: 'carries', reasons: [{ code: 'bending-margin', text, values }, BENDING_ONLY] };
+	const text = `The margin in ${say.of} is ${shown(margin)}, and ${shown(low)} at the bad end of the uncertainty; the plant needs ${needed}.`;
+	const enough = { code: say.codes.enough, text, values };
+	return reviews.length > 0
+		? { verdict: 'close', reasons: [...reviews, enough, ...scope, ...warnings] }
+		: { verdict: 'carries', reasons: [enough, ...scope, ...warnings] };
 }
 
-export const OUT_OF_RANGE: Reason = {
-	code: 'out-of-range',
-	text: 'These values lead to a figure too large or too small to compute with. Check the readings and their units.'
+interface Sentence {
+	of: string;
+	short: string;
+	codes: { short: string; low: string; enough: string };
+}
+
+const SENTENCES: Record<LimitName, Sentence> = {
+	'gear-bending': {
+		of: 'bending',
+		short: 'this gear falls short',
+		codes: { short: 'bending-margin-short', low: 'bending-margin-low', enough: 'bending-margin' }
+	},
+	wear: {
+		of: 'wear',
+		short: 'the flanks of the pair fall short',
+		codes: { short: 'wear-margin-short', low: 'wear-margin-low', enough: 'wear-margin' }
+	},
+	'mate-bending': {
+		of: "bending of the mate's teeth",
+		short: 'the mate falls short',
+		codes: {
+			short: 'mate-bending-margin-short',
+			low: 'mate-bending-margin-low',
+			enough: 'mate-bending-margin'
+		}
+	}
 };
+
+/** What the verdict does not cover, because the input does not tell enough of the mate. */
+function scopeOf(limits: Limit[]): Reason[] {
+	const has = (name: LimitName) => limits.some(({ answer }) => answer === name);
+	if (!has('wear') && !has('mate-bending')) return [BENDING_ONLY];
+	if (!has('wear')) return [WEAR_NOT_KNOWN];
+	return has('mate-bending') ? [] : [MATE_BENDING_NOT_KNOWN];
+}
 
 const BENDING_ONLY: Reason = {
 	code: 'bending-only',
-	text: "This version works out bending of this gear's teeth. Wear, and the mate's teeth, are not in it."
+	text: "This is bending of this gear's teeth only. For wear and for the mate's teeth, give the mate with its form, material and hardness."
+};
+
+const WEAR_NOT_KNOWN: Reason = {
+	code: 'wear-not-known',
+	text: 'Wear is not in this verdict: give modulus and hardness of both materials.'
+};
+
+const MATE_BENDING_NOT_KNOWN: Reason = {
+	code: 'mate-bending-not-known',
+	text: "Bending of the mate's teeth is not in this verdict: give its tooth form and material."
 };
 
 /** The outcome of a check that gives no figures: every field empty, the reasons say why. */
@@ -69,21 +127,12 @@ export function cannotSay(reasons: Reason[]): Outcome {
 	return {
 		core: CORE_VERSION,
 		...NO_FIGURES,
-		formFactorSource: null,
-		formFactorGeometry: null,
-		wear: null,
-		mateBending: null,
-		mesh: null,
 		original: null,
 		verdict: 'cannot-say',
 		reasons,
 		remedies: [],
 		working: []
 	};
-}
-
-function meets(margin: number, needed: number): boolean {
-	return margin >= needed * (1 - ROUNDING);
 }
 
 /** Two decimals, rounded down: a margin that falls short never reads as if it did not. */

@@ -4,5 +4,9 @@
  *
  * 0.1.0  Spur gears: pitch, velocity, Barth's velocity factor, Lewis bending by the handbook table, margin with
  *        its low end, permitted power and torque, verdict, working.
+ * 1.0.0  Helical, internal, rack; every form, angle and shift by geometry beside the handbook; wear by Hertz and
+ *        Buckingham; bending of the mate; mesh; comparison with the original; remedies; what limits. The low end of
+ *        the margin is taken at the point of steepest fall (was M (1 - 1.645 u)); permitted power is that of the
+ *        answer that decides.
  */
-export const CORE_VERSION = '0.1.0';
+export const CORE_VERSION = '1.0.0';

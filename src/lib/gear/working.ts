@@ -7,7 +7,7 @@ import { toSI, type Unit } from './quantity';
 import { SOURCES } from './sources';
 
 /** What a line says about a figure. `expression` holds the names of the terms as symbols. */
-export type LineHead = Omit<WorkingLine, 'numbers' | 'value'>;
+export type LineHead = Omit<WorkingLine, 'numbers' | 'value' | 'of'>;
 
 export interface Recorder {
 	/** Computes a figure from its terms; the terms replace their symbols in the line's numbers. */
@@ -18,16 +18,26 @@ export interface Recorder {
 	): number;
 	/** A reading or a value of the plant, converted to the core's unit. */
 	given(head: Omit<LineHead, 'expression' | 'source'>, quantity: Quantity<Unit>): number;
+	/** The same working, for figures of the mate. */
+	mate(): Recorder;
 }
 
 export const unrecorded: Recorder = {
 	step: (_head, terms, compute) => compute(terms),
-	given: (_head, quantity) => toSI(quantity)
+	given: (_head, quantity) => toSI(quantity),
+	mate: () => unrecorded
 };
 
 /** A recorder that keeps its lines. */
 export class Working implements Recorder {
-	readonly lines: WorkingLine[] = [];
+	constructor(
+		readonly lines: WorkingLine[] = [],
+		private readonly of?: WorkingLine['of']
+	) {}
+
+	mate(): Recorder {
+		return new Working(this.lines, 'mate');
+	}
 
 	step<Terms extends Record<string, number>>(
 		head: LineHead,
@@ -53,7 +63,9 @@ export class Working implements Recorder {
 		source: string
 	): void {
 		// A line without a figure would show nothing; the outcome itself says why there is none.
-		if (Number.isFinite(value)) this.lines.push({ symbol, name, expression, numbers, value, unit, source });
+		if (!Number.isFinite(value)) return;
+		const line = { symbol, name, expression, numbers, value, unit, source };
+		this.lines.push(this.of ? { ...line, of: this.of } : line);
 	}
 }
 
@@ -76,8 +88,20 @@ function withNumbers(expression: string, terms: Record<string, number>): string 
 /** Six significant digits: more than any reading has, few enough to check by hand. */
 function figure(value: number): string {
 	if (value === Infinity) return '∞';
-	// Whole numbers of few digits (teeth, constants of a pitch) need no rounding, which is the costly part.
-	const digits =
-		Number.isInteger(value) && Math.abs(value) < 1e6 ? `${value}` : `${Number(value.toPrecision(6))}`;
+	const digits = `${sixDigits(value)}`;
 	return value < 0 ? `(${digits})` : digits;
 }
+
+/** What toPrecision(6) would say. That is the costly part of a working, and most figures are of ordinary size. */
+function sixDigits(value: number): number {
+	const size = Math.abs(value);
+	if (Number.isInteger(value) && size < 1e6) return value;
+	if (size >= 1e-3 && size < 1e6) {
+		const scale = SCALES[5 - Math.floor(Math.log10(size))] ?? 1;
+		return Math.round(value * scale) / scale;
+	}
+	return Number(value.toPrecision(6));
+}
+
+/** Powers of ten by the digits that six significant ones leave behind the point. */
+const SCALES: readonly number[] = [1, 10, 100, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8];

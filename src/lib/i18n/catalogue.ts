@@ -9,6 +9,7 @@ import { door } from './messages/door';
 import { gear } from './messages/gear';
 import { materials } from './messages/materials';
 import { office } from './messages/office';
+import { reasons } from './messages/reasons';
 import { sync } from './messages/sync';
 import { tablet } from './messages/tablet';
 import { verdict } from './messages/verdict';
@@ -21,6 +22,7 @@ const catalogue = {
 	...gear,
 	...materials,
 	...office,
+	...reasons,
 	...sync,
 	...tablet,
 	...verdict,

@@ -5,10 +5,8 @@
 import type { Outcome } from '$lib/gear/contract';
 import { evaluate } from '$lib/gear/evaluate';
 import { cannotSay } from '$lib/gear/verdict';
-import { assembleInput, type Missing } from './assemble';
+import { assembleInput, type Missing, type PlantSide } from './assemble';
 import type { CheckAnswers } from './check';
-import type { MaterialStatement } from './material';
-import type { PlantRules } from './plant-rules';
 
 const WORDS: Record<Missing, string> = {
 	teeth: 'number of teeth',
@@ -23,13 +21,8 @@ const WORDS: Record<Missing, string> = {
 	material: 'material of the spare'
 };
 
-export function answerCheck(
-	answers: CheckAnswers,
-	material: MaterialStatement | null,
-	rules: PlantRules,
-	performedAt: string
-): Outcome {
-	const assembled = assembleInput(answers, material, rules, performedAt);
+export function answerCheck(answers: CheckAnswers, plantSide: PlantSide, performedAt: string): Outcome {
+	const assembled = assembleInput(answers, plantSide, performedAt);
 	if (assembled.ok) return evaluate(assembled.input);
 	return cannotSay(
 		assembled.missing.map((field) => ({

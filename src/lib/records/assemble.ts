@@ -40,11 +40,19 @@ export function coreMaterial(row: MaterialStatement, on: string): Material {
 	};
 }
 
+/** What the plant brings to a check. */
+export interface PlantSide {
+	/** Of the spare, in the revision that the check is made with. */
+	material: MaterialStatement | null;
+	rules: PlantRules;
+	/** The plant's list as it stands: remedies are offered from its permitted ones. */
+	offered: readonly MaterialStatement[];
+}
+
 /** @param performedAt ISO 8601 moment of the check, which decides whether a permission was valid */
 export function assembleInput(
 	answers: CheckAnswers,
-	material: MaterialStatement | null,
-	rules: PlantRules,
+	{ material, rules, offered }: PlantSide,
 	performedAt: string
 ): Assembled {
 	const teeth = isReading(answers.teeth) ? answers.teeth.value : null;
@@ -80,7 +88,8 @@ export function assembleInput(
 		const missing = (Object.keys(asked) as Missing[]).filter((name) => asked[name] === null);
 		return { ok: false, missing };
 	}
-	const { serviceFactors: _offered, uncertainty, ...coreRules } = rules;
+	const { serviceFactors: _factors, uncertainty, ...coreRules } = rules;
+	const on = performedAt.slice(0, 10);
 	return {
 		ok: true,
 		input: {
@@ -92,10 +101,11 @@ export function assembleInput(
 				form,
 				faceWidth,
 				finish,
-				material: coreMaterial(material, performedAt.slice(0, 10))
+				material: coreMaterial(material, on)
 			},
 			drive: { load, speed, serviceFactor, bending: answers.reversing ? 'reversing' : 'one-way' },
 			rules: coreRules,
+			permittedMaterials: offered.map((row) => coreMaterial(row, on)).filter(({ permitted }) => permitted),
 			uncertainty
 		}
 	};

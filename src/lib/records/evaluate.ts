@@ -75,7 +75,9 @@ const toothedPart = {
 	pressureAngle: between('Pressure angle (degrees)', 5, 45),
 	form,
 	profileShift: between('Profile shift (in modules)', -2, 2).optional(),
-	helixAngle: between('Helix angle (degrees)', 0, 60).optional()
+	helixAngle: between('Helix angle (degrees)', 0, 60).optional(),
+	tipWear: length('Wear of the tips').optional(),
+	toothThickness: length('Tooth thickness').optional()
 };
 
 /** What must agree within one gear; `kind` decides. */
@@ -117,6 +119,9 @@ const mate = strictFields('Mate', {
 	form: form.optional(),
 	profileShift: toothedPart.profileShift,
 	helixAngle: toothedPart.helixAngle,
+	tipWear: toothedPart.tipWear,
+	toothThickness: toothedPart.toothThickness,
+	worn: z.boolean(must('Worn', 'true or false')).optional(),
 	finish: finish.optional(),
 	faceWidth: length('Face width of the mate').optional(),
 	material: material.optional(),
@@ -177,10 +182,20 @@ export const evaluateInput = strictFields('Check', {
 		.max(500, 'Permitted materials must be at most 500.')
 		.optional(),
 	uncertainty: uncertainty.optional()
-}).superRefine(({ gear, drive }, { addIssue }) => {
-	if (gear.kind === 'rack' || drive.velocity === undefined) return;
-	const message = 'Velocity is for a rack: leave it out and give the speed of this gear in rpm.';
-	addIssue({ code: 'custom', path: ['drive', 'velocity'], message });
+}).superRefine(({ gear, original, drive }, { addIssue }) => {
+	const refuse = (path: string[], message: string) => addIssue({ code: 'custom', path, message });
+	if (gear.kind !== 'rack' && drive.velocity !== undefined) {
+		refuse(
+			['drive', 'velocity'],
+			'Velocity is for a rack: leave it out and give the speed of this gear in rpm.'
+		);
+	}
+	if (gear.kind === 'rack' && drive.speed !== undefined) {
+		refuse(['drive', 'speed'], 'A rack has no speed in rpm: leave it out and give its velocity.');
+	}
+	if (original && (original.kind === 'rack') !== (gear.kind === 'rack')) {
+		refuse(['original', 'kind'], 'A rack can only stand in for a rack: check the kind of both.');
+	}
 });
 
 export type ParsedEvaluate = { ok: true; input: EvaluateInput } | { ok: false; error: InvalidInput };

@@ -4,11 +4,15 @@ import type { Outcome } from '$lib/gear/contract';
 
 const figure = z.number().nullable();
 const text = z.string().max(2000);
+const limitName = z.enum(['gear-bending', 'mate-bending', 'wear']);
+/** A value with its unit, or the name of a finish or material. */
+const remedyValue = z.union([z.string().max(200), z.object({ value: z.number(), unit: z.string().max(20) })]);
 
 export const outcome: z.ZodType<Outcome> = z.object({
 	core: z.string().max(40),
 	pitchDiameter: figure,
 	module: figure,
+	normalModule: figure,
 	diametralPitch: figure,
 	circularPitch: figure,
 	pitchLineVelocity: figure,
@@ -18,6 +22,7 @@ export const outcome: z.ZodType<Outcome> = z.object({
 	formFactorSource: z.enum(['handbook', 'geometry']).nullable(),
 	formFactorHandbook: figure,
 	formFactorGeometry: figure,
+	stressConcentration: figure,
 	tangentialForce: figure,
 	designForce: figure,
 	bendingStress: figure,
@@ -26,6 +31,10 @@ export const outcome: z.ZodType<Outcome> = z.object({
 	bendingMarginLow: figure,
 	permittedPower: figure,
 	permittedTorque: figure,
+	limits: z
+		.array(z.object({ answer: limitName, margin: z.number(), marginLow: z.number(), needed: z.number() }))
+		.max(3),
+	limitedBy: limitName.nullable(),
 	wear: z
 		.object({
 			contactStress: z.number(),
@@ -40,10 +49,11 @@ export const outcome: z.ZodType<Outcome> = z.object({
 		.nullable(),
 	mesh: z
 		.object({
-			ratio: z.number(),
-			standardCentreDistance: z.number(),
+			ratio: figure,
+			standardCentreDistance: figure,
 			operatingPressureAngle: z.number(),
 			contactRatio: z.number(),
+			overlapRatio: z.number(),
 			normalBacklash: figure,
 			huntingTooth: z.boolean(),
 			undercut: z.object({ gear: z.boolean(), mate: z.boolean() }),
@@ -65,9 +75,11 @@ export const outcome: z.ZodType<Outcome> = z.object({
 		.array(
 			z.object({
 				change: z.enum(['power', 'speed', 'faceWidth', 'finish', 'material']),
-				value: z.union([z.string().max(200), z.object({ value: z.number(), unit: z.string().max(20) })]),
+				value: remedyValue,
 				likeForLike: z.boolean(),
-				bendingMargin: z.number()
+				bendingMargin: z.number(),
+				bendingMarginLow: z.number(),
+				carriesAt: remedyValue.nullable()
 			})
 		)
 		.max(50),
@@ -80,7 +92,8 @@ export const outcome: z.ZodType<Outcome> = z.object({
 				numbers: z.string().max(400),
 				value: z.number(),
 				unit: z.string().max(20),
-				source: z.string().max(400)
+				source: z.string().max(400),
+				of: z.literal('mate').optional()
 			})
 		)
 		.max(100)

@@ -3,57 +3,113 @@
  * the schema lets through.
  */
 import fc from 'fast-check';
-import type { EvaluateInput, Load, Pitch } from '$lib/gear/contract';
+import type { EvaluateInput, Gear, GearKind, Load, Material, Mate, Pitch } from '$lib/gear/contract';
 
-const within = (min: number, max: number) => fc.double({ min, max, noNaN: true });
-
-const finish = fc.constantFrom('cast', 'cut', 'hobbed', 'ground');
+export const within = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const maybe = <T>(of: fc.Arbitrary<T>) => fc.option(of, { nil: undefined });
+const finish = fc.constantFrom('cast', 'cut', 'hobbed', 'ground');
 
-function check(parts: {
+const size = <U extends string>(min: number, max: number, unit: U) =>
+	within(min, max).map((value) => ({ value, unit }));
+
+interface Parts {
+	kinds: GearKind[];
 	teeth: fc.Arbitrary<number>;
 	pitch: fc.Arbitrary<Pitch>;
-	form: fc.Arbitrary<Pick<EvaluateInput['gear'], 'form' | 'pressureAngle' | 'profileShift'>>;
-	faceWidth: fc.Arbitrary<EvaluateInput['gear']['faceWidth']>;
-	allowable: fc.Arbitrary<EvaluateInput['gear']['material']['allowableBending']>;
+	form: fc.Arbitrary<Pick<Gear, 'form' | 'pressureAngle' | 'profileShift'>>;
+	faceWidth: fc.Arbitrary<Gear['faceWidth']>;
+	material: fc.Arbitrary<Material>;
 	load: fc.Arbitrary<Load>;
 	rpm: fc.Arbitrary<number>;
-}): fc.Arbitrary<EvaluateInput> {
-	return fc.record({
-		gear: fc
-			.record({
-				teeth: parts.teeth,
-				pitch: parts.pitch,
-				form: parts.form,
-				faceWidth: parts.faceWidth,
-				finish,
-				allowableBending: parts.allowable,
-				metallic: fc.boolean(),
-				permitted: fc.boolean()
-			})
-			.map(({ form, allowableBending, metallic, permitted, ...gear }) => ({
-				kind: 'spur' as const,
-				...gear,
-				...form,
-				material: { name: 'any', metallic, permitted, allowableBending }
-			})),
-		mate: maybe(fc.record({ kind: fc.constant('spur' as const), faceWidth: maybe(parts.faceWidth) })),
-		drive: fc.record({
+	centreDistance: fc.Arbitrary<NonNullable<Mate['centreDistance']>>;
+	uncertainty: [number, number];
+}
+
+function gearOf(parts: Parts, kinds: GearKind[]): fc.Arbitrary<Gear> {
+	return fc
+		.record({
+			kind: fc.constantFrom(...kinds),
+			teeth: parts.teeth,
+			pitch: parts.pitch,
+			plane: maybe(fc.constantFrom('normal', 'transverse')),
+			helix: within(0, 45),
+			form: parts.form,
+			faceWidth: parts.faceWidth,
+			finish,
+			material: parts.material
+		})
+		.map(({ kind, teeth, helix, form, ...gear }) => ({
+			...gear,
+			...form,
+			kind,
+			...(kind === 'rack' ? {} : { teeth }),
+			...(kind === 'helical' ? { helixAngle: helix } : {})
+		})) as fc.Arbitrary<Gear>;
+}
+
+function mateOf(parts: Parts): fc.Arbitrary<Mate> {
+	return fc.record(
+		{
+			kind: fc.constant('spur' as const),
+			teeth: parts.teeth,
+			form: fc.constantFrom('full-depth', 'stub'),
+			faceWidth: parts.faceWidth,
+			material: parts.material,
+			finish,
+			worn: fc.boolean(),
+			centreDistance: parts.centreDistance
+		},
+		{ requiredKeys: ['kind'] }
+	) as fc.Arbitrary<Mate>;
+}
+
+/** A gear with its mate that fits it (same pitch, angle and helix), its original and its drive. */
+function check(parts: Parts): fc.Arbitrary<EvaluateInput> {
+	const [least, most] = parts.uncertainty;
+	return fc
+		.record({
+			gear: gearOf(parts, parts.kinds),
+			mate: maybe(mateOf(parts)),
+			original: maybe(gearOf(parts, ['spur'])),
 			load: parts.load,
-			speed: fc.record({ value: parts.rpm, unit: fc.constant('rpm' as const) }),
+			rpm: parts.rpm,
 			serviceFactor: within(0.1, 10),
-			bending: fc.constantFrom('one-way', 'reversing')
-		}),
-		rules: maybe(
-			fc.record({
-				formFactor: fc.constantFrom('handbook', 'handbook', 'handbook', 'geometry', 'lower-of-both'),
-				cutLaw: fc.constantFrom(600, 1200),
-				bendingMargin: within(0.1, 100),
-				reversingFactor: within(0.1, 1)
-			})
-		),
-		uncertainty: maybe(fc.record({ faceWidth: within(0, 0.5), load: within(0, 0.5), speed: within(0, 0.5) }))
-	}) as fc.Arbitrary<EvaluateInput>;
+			bending: fc.constantFrom('one-way', 'reversing'),
+			rules: maybe(
+				fc.record({
+					formFactor: fc.constantFrom('handbook', 'geometry', 'lower-of-both'),
+					cutLaw: fc.constantFrom(600, 1200),
+					bendingMargin: within(0.1, 100),
+					wearMargin: within(0.1, 100),
+					reversingFactor: within(0.1, 1)
+				})
+			),
+			permittedMaterials: maybe(fc.array(parts.material, { maxLength: 6 })),
+			uncertainty: maybe(
+				fc.record({
+					faceWidth: within(least, most),
+					load: within(least, most),
+					speed: within(least, most)
+				})
+			)
+		})
+		.map(({ load, rpm, serviceFactor, bending, mate, original, ...rest }) => {
+			const { kind, helixAngle } = rest.gear;
+			const rack = kind === 'rack';
+			return {
+				...rest,
+				mate: mate && (kind === 'helical' ? { ...mate, kind, helixAngle } : mate),
+				original: rack ? undefined : original,
+				drive: {
+					load,
+					...(rack
+						? { velocity: { value: Math.min(rpm, 90_000), unit: 'ft/min' as const } }
+						: { speed: { value: rpm, unit: 'rpm' as const } }),
+					serviceFactor,
+					bending
+				}
+			};
+		}) as fc.Arbitrary<EvaluateInput>;
 }
 
 const handbookForm = fc.constantFrom(
@@ -62,10 +118,26 @@ const handbookForm = fc.constantFrom(
 	{ form: 'stub' as const, pressureAngle: 20 }
 );
 
-const size = <U extends string>(min: number, max: number, unit: U) =>
-	within(min, max).map((value) => ({ value, unit }));
+const material = (
+	allowable: [number, number],
+	modulus: [number, number],
+	brinell: [number, number]
+): fc.Arbitrary<Material> =>
+	fc.record(
+		{
+			name: fc.constantFrom('one', 'two', 'three'),
+			metallic: fc.boolean(),
+			allowableBending: size(...allowable, 'MPa' as const),
+			brinell: within(...brinell),
+			modulus: size(...modulus, 'GPa' as const),
+			poisson: within(0, 0.5),
+			permitted: fc.boolean()
+		},
+		{ requiredKeys: ['name', 'metallic', 'allowableBending', 'permitted'] }
+	);
 
-export const realistic = check({
+const realisticParts: Parts = {
+	kinds: ['spur'],
 	teeth: fc.integer({ min: 10, max: 400 }),
 	pitch: fc.oneof(
 		within(1, 20).map((value) => ({ system: 'diametral' as const, value })),
@@ -73,16 +145,36 @@ export const realistic = check({
 	),
 	form: handbookForm,
 	faceWidth: size(5, 300, 'mm'),
-	allowable: size(10, 600, 'MPa'),
+	material: material([10, 600], [80, 210], [150, 400]),
 	load: fc.oneof(
 		size(0.1, 500, 'kW').map((power) => ({ power })),
 		size(1, 5000, 'N*m').map((torque) => ({ torque })),
 		size(10, 50000, 'N').map((tangentialForce) => ({ tangentialForce }))
 	),
-	rpm: within(0.1, 200)
+	rpm: within(0.1, 200),
+	centreDistance: size(20, 5000, 'mm'),
+	uncertainty: [0, 0.3]
+};
+
+/** Spur gears whose drive, mate and materials a plant could have. */
+export const realistic = check({ ...realisticParts });
+
+/** The same with helical and internal gears and racks, shifted teeth and odd angles. */
+export const realisticOfAllKinds = check({
+	...realisticParts,
+	kinds: ['spur', 'helical', 'internal', 'rack'],
+	form: fc.oneof(
+		handbookForm,
+		fc.record({
+			form: fc.constant('full-depth' as const),
+			pressureAngle: within(14.5, 25),
+			profileShift: within(0, 0.4)
+		})
+	)
 });
 
 export const allowed = check({
+	kinds: ['spur', 'helical', 'internal', 'rack'],
 	teeth: fc.integer({ min: 1, max: 5000 }),
 	pitch: fc.oneof(
 		within(0.1, 500).map((value) => ({ system: 'diametral' as const, value })),
@@ -96,18 +188,19 @@ export const allowed = check({
 			pressureAngle: within(5, 45),
 			profileShift: within(-2, 2)
 		}),
-		within(0.1, 2).map((addendum) => ({
-			form: { addendum, dedendum: 1.25, tipRadius: 0 },
-			pressureAngle: 20
-		}))
+		fc
+			.record({ addendum: within(0.1, 2), dedendum: within(0.1, 2.5), tipRadius: within(0, 1) })
+			.map((form) => ({ form, pressureAngle: 20 }))
 	),
 	faceWidth: size(0.1, 20_000, 'mm'),
-	allowable: size(0.01, 10_000, 'MPa'),
+	material: material([0.01, 10_000], [0.001, 2000], [1, 1000]),
 	load: fc.oneof(
 		fc.constant('unknown' as const),
 		size(0.001, 1e9, 'W').map((power) => ({ power })),
 		size(1e-6, 1e9, 'N*m').map((torque) => ({ torque })),
 		size(1e-6, 1e9, 'N').map((tangentialForce) => ({ tangentialForce }))
 	),
-	rpm: within(0.001, 200_000)
+	rpm: within(0.001, 200_000),
+	centreDistance: size(0.1, 20_000, 'mm'),
+	uncertainty: [0, 0.5]
 });

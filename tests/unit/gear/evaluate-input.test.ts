@@ -53,6 +53,15 @@ const CHECK = {
 	uncertainty: { faceWidth: 0.01, load: 0.1, speed: 0.01 }
 };
 
+const RACK_CHECK = {
+	gear: { ...GEAR, kind: 'rack', teeth: undefined },
+	drive: {
+		load: { tangentialForce: { value: 2, unit: 'kN' } },
+		velocity: { value: 0.2, unit: 'm/s' },
+		serviceFactor: 1
+	}
+};
+
 /** The whole check with one field set, or taken away by `undefined`. */
 function changed(path: string, value: unknown, from: unknown = CHECK): unknown {
 	const [key = '', ...rest] = path.split('.');
@@ -87,7 +96,7 @@ describe('is accepted', () => {
 		['a circular pitch', changed('gear.pitch', { system: 'circular', value: 1.25, unit: 'in' })],
 		['a form by its rack', changed('gear.form', { addendum: 1, dedendum: 1.25, tipRadius: 0.3 })],
 		['no speed, which the verdict then asks for', changed('drive.speed', undefined)],
-		['a rack without teeth', changed('gear', { ...GEAR, kind: 'rack', teeth: undefined })],
+		['a rack without teeth, with its velocity', RACK_CHECK],
 		['some rules only', changed('rules', { cutLaw: 600 })],
 		['a speed limit for one finish', changed('rules.speedLimit', { cut: { value: 2000, unit: 'ft/min' } })]
 	])('%s', (_what, input) => {
@@ -102,6 +111,19 @@ describe('is accepted', () => {
 });
 
 describe('is refused, with the field and the remedy', () => {
+	test.each([
+		['drive.speed', { ...RACK_CHECK, drive: { ...RACK_CHECK.drive, speed: { value: 10, unit: 'rpm' } } }],
+		['original.kind', { ...RACK_CHECK, original: GEAR }],
+		['drive.velocity', changed('drive.velocity', { value: 1, unit: 'm/s' })],
+		['mate.worn', changed('mate.worn', 'a little')],
+		['gear.tipWear.value', changed('gear.tipWear', { value: -1, unit: 'mm' })],
+		['gear.toothThickness.unit', changed('gear.toothThickness', { value: 1, unit: 'rpm' })]
+	])('%s', (path, input) => {
+		const issues = issuesOf(input);
+		expect(issues.map((issue) => issue.path)).toContain(path);
+		for (const { message } of issues) expect(message).toMatch(/\b(must|leave|check)\b/);
+	});
+
 	const lengths = 'Face width must be between 0.1 mm and 20 m.';
 	test.each([
 		['gear.teeth', 24.5, 'Teeth must be a whole number of at least 1.'],

@@ -103,17 +103,22 @@ describe('material not permitted', () => {
 
 describe('cannot say', () => {
 	const rack = { addendum: 1, dedendum: 1.25, tipRadius: 0.3 };
+	const onRack = (load: EvaluateInput['drive']['load']): EvaluateInput => ({
+		...withGear({ kind: 'rack', teeth: undefined }),
+		drive: { load, velocity: { value: 1, unit: 'm/s' }, serviceFactor: 1 }
+	});
 	const refused: [code: string, input: EvaluateInput][] = [
-		['kind-not-covered', withGear({ kind: 'helical', helixAngle: 15 })],
-		['kind-not-covered', withGear({ kind: 'internal' })],
-		['kind-not-covered', { ...withGear({ kind: 'rack', teeth: undefined }) }],
-		['kind-not-covered', withGear({ helixAngle: 10 })],
-		['form-rule-not-covered', withRules({ formFactor: 'geometry' })],
-		['form-rule-not-covered', withRules({ formFactor: 'lower-of-both' })],
-		['profile-shift-not-covered', withGear({ profileShift: 0.3 })],
-		['form-not-in-table', withGear({ pressureAngle: 25 })],
-		['form-not-in-table', withGear({ pressureAngle: 14.5, form: 'stub' })],
-		['form-not-in-table', withGear({ form: rack })],
+		['angle-not-covered', withGear({ pressureAngle: 30 })],
+		['tooth-pointed', withGear({ teeth: 12, profileShift: 0.9 })],
+		[
+			'undercut-too-deep',
+			withGear({ teeth: 10, pressureAngle: 15, profileShift: -0.5, form: { ...rack, addendum: 1.4 } })
+		],
+		['shift-too-large', withGear({ profileShift: 1.4 })],
+		['tip-worn-away', withGear({ tipWear: { value: 8, unit: 'mm' } })],
+		['rack-tip-too-round', withGear({ form: { ...rack, tipRadius: 0.5 } })],
+		['velocity-missing', withGear({ kind: 'rack', teeth: undefined })],
+		['torque-on-rack', onRack({ torque: { value: 50, unit: 'N*m' } })],
 		['too-few-teeth', withGear({ teeth: 9 })],
 		['teeth-missing', withGear({ teeth: undefined })],
 		['speed-missing', withDrive({ speed: undefined })],

@@ -23,7 +23,7 @@ const FIGURES: readonly [FigureName, MessageKey, string][] = [
 	['bendingMarginLow', 'working.low end of the margin', ''],
 	['bendingStress', 'working.bending stress, velocity and service factors in', 'MPa'],
 	['allowableBending', 'working.allowable bending stress of the material', 'MPa'],
-	['formFactor', 'working.Lewis form factor, load at the tip', ''],
+	['formFactor', 'working.Lewis form factor that counts, by the rule of the plant', ''],
 	['velocityFactor', 'working.velocity factor', ''],
 	['pitchLineVelocity', 'working.pitch-line velocity', 'm/s'],
 	['tangentialForce', 'working.tangential force', 'N'],

@@ -3,7 +3,7 @@
  * changes. It holds no rule of its own: what the answers come to is asked of the core through `answerCheck`.
  */
 import { answerCheck } from '$lib/records/answer-check';
-import { assembleInput } from '$lib/records/assemble';
+import { assembleInput, type PlantSide } from '$lib/records/assemble';
 import { noAnswers, type CheckAnswers } from '$lib/records/check';
 import type { CheckRow, MachineRow, MaterialRow, PositionRow, RulesRow } from '$lib/records/mirror';
 import type { Draft, KeptRecord, LocalPerson, Tablet } from '$lib/tablet/start';
@@ -33,12 +33,14 @@ export class OpenCheck {
 	material = $derived(this.materials.find(({ id }) => id === this.answers.materialId) ?? null);
 	/** The moment the answers are judged at: when it was kept, or now. */
 	moment = $derived(this.record?.record.performedAt ?? new Date().toISOString());
-	question = $derived(
-		this.rules ? assembleInput(this.answers, this.material, this.rules.rules, this.moment) : null
+	/** What the plant brings to the check; null before the plant's rules were ever fetched. */
+	#plantSide: PlantSide | null = $derived(
+		this.rules && { material: this.material, rules: this.rules.rules, offered: this.materials }
 	);
+	question = $derived(this.#plantSide && assembleInput(this.answers, this.#plantSide, this.moment));
 	outcome = $derived.by(() => {
 		if (this.record) return this.record.record.body.outcome;
-		return this.rules ? answerCheck(this.answers, this.material, this.rules.rules, this.moment) : null;
+		return this.#plantSide && answerCheck(this.answers, this.#plantSide, this.moment);
 	});
 
 	constructor(tablet: Tablet, person: LocalPerson, id: string) {
@@ -132,11 +134,11 @@ export class OpenCheck {
 
 	/** Keeps the check as a record; the promise resolves when it is on disk. */
 	async keep(): Promise<void> {
-		if (!this.draft || !this.rules || !this.position || !this.machine) return;
+		if (!this.draft || !this.rules || !this.#plantSide || !this.position || !this.machine) return;
 		await this.#saving;
 		const performedAt = new Date().toISOString();
 		const draft = $state.snapshot(this.draft);
-		const outcome = answerCheck(draft.answers, this.material, this.rules.rules, performedAt);
+		const outcome = answerCheck(draft.answers, this.#plantSide, performedAt);
 		await this.#tablet.keep({
 			draft,
 			performedAt,

@@ -12,8 +12,7 @@ import { figure, fixed, margin } from '$lib/i18n/format';
 const CODED: Record<string, string> = {
 	field: 'missing',
 	law: 'gear.law',
-	kind: 'gear.kind',
-	formFactor: 'form-rule'
+	kind: 'gear.kind'
 };
 
 export function reasonWords(reason: Reason, words: Words): string {
@@ -46,6 +45,12 @@ function numberWords(name: string, value: number, { language }: Words): string {
 		case 'gear':
 		case 'mate':
 			return fixed(value, 3, language);
+		case 'backlash':
+		case 'jam':
+		case 'least':
+		case 'most':
+		case 'contactRatio':
+			return fixed(value, 2, language);
 		case 'velocity':
 		case 'end':
 			return `${fixed(value, 2, language)} m/s (${fixed(fromSI(value, 'ft/min'), 0, language)} ft/min)`;
@@ -60,19 +65,27 @@ function codeWords(name: string, value: string, { t }: Words): string {
 }
 
 /** The one sentence under the verdict. Figures stand beside it already, so a margin is not told twice. */
-export function verdictSentence({ verdict, reasons }: Outcome, words: Words): string {
+export function verdictSentence({ verdict, reasons, limitedBy }: Outcome, words: Words): string {
 	const [first] = reasons;
 	if (verdict === 'not-permitted') {
 		return words.t('verdict.say.not-permitted', { material: String(first?.values?.material ?? '') });
 	}
 	if (first?.code === 'missing') return words.t('verdict.say.missing');
 	if (verdict === 'cannot-say') return first ? reasonWords(first, words) : '';
+	if (verdict === 'will-not-carry') return words.t(`verdict.decides.${limitedBy ?? 'gear-bending'}`);
+	// Sent to review by a rule, not by its low end.
+	if (verdict === 'close' && first && !isMargin(first)) return reasonWords(first, words);
 	return words.t(`verdict.say.${verdict}`);
+}
+
+/** The margin that decided: its figures stand in the panel and the table. */
+function isMargin({ code }: Reason): boolean {
+	return /^(mate-bending|bending|wear)-margin/.test(code);
 }
 
 /** What stands below: every reason that the sentence and the figures do not tell. */
 export function otherReasons({ reasons }: Outcome): Reason[] {
-	return reasons.slice(1).filter(({ code }) => code !== 'missing' && !code.startsWith('bending-margin'));
+	return reasons.slice(1).filter((reason) => reason.code !== 'missing' && !isMargin(reason));
 }
 
 /** The answers that are still missing, by the codes of records/assemble.ts. */

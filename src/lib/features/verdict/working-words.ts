@@ -32,9 +32,9 @@ const INCH_UNIT: Readonly<Record<string, { unit: Unit; shown: string }>> = {
 };
 
 export function workingRows(lines: readonly WorkingLine[], words: Words): WorkingRow[] {
-	return lines.map(({ symbol, name, expression, numbers, value, unit, source }) => ({
+	return lines.map(({ symbol, name, expression, numbers, value, unit, source, of }) => ({
 		symbol,
-		name: translated(`working.${name}`, name, words),
+		name: nameWords(name, of, words),
 		expression: translated(`expression.${expression}`, expression, words),
 		numbers: numbersWords(numbers, words),
 		value: shown(value, words),
@@ -42,6 +42,11 @@ export function workingRows(lines: readonly WorkingLine[], words: Words): Workin
 		inch: inchWords(value, unit, words),
 		source: sourceWords(source, words)
 	}));
+}
+
+function nameWords(name: string, of: WorkingLine['of'], words: Words): string {
+	const told = translated(`working.${name}`, name, words);
+	return of ? words.t(`working-of.${of}`, { name: told }) : told;
 }
 
 /** "definition; Mott, Machine Elements …": what is prose is translated, a title is not. */

@@ -10,6 +10,40 @@ export const checkPage = {
 		'nada se convierte antes de guardarse'
 	],
 	'check-page.drive': ['Drive and spare', 'Accionamiento y repuesto'],
+	'recomputed.same': [
+		'Recomputed with core {core}: the same verdict.',
+		'Recalculada con el núcleo {core}: el mismo veredicto.'
+	],
+	'recomputed.changed': [
+		'Recomputed with core {core}: another verdict.',
+		'Recalculada con el núcleo {core}: otro veredicto.'
+	],
+	'recomputed.then-now': [
+		'Core {old} said: {then}. Core {core} says: {now}.',
+		'El núcleo {old} dijo: {then}. El núcleo {core} dice: {now}.'
+	],
+	'recomputed.said': ['{verdict}, margin in bending {margin}', '{verdict}, margen a flexión {margin}'],
+	'check-page.figures': ['Tooth, flanks and mesh', 'Diente, flancos y engrane'],
+	'figures.handbook': ['Form factor by the handbook', 'Factor de forma por el manual'],
+	'figures.geometry': ['Form factor by geometry', 'Factor de forma por geometría'],
+	'figures.counts': ['{value}, counts', '{value}, cuenta'],
+	'figures.concentration': [
+		'Stress concentration at the fillet, for information',
+		'Concentración de esfuerzo en el filete, como información'
+	],
+	'figures.contact': ['Contact stress', 'Esfuerzo de contacto'],
+	'figures.allowable-contact': ['Allowable contact stress', 'Esfuerzo de contacto admisible'],
+	'figures.wear-load': ['Limit load for wear', 'Carga límite de desgaste'],
+	'figures.ratio': ['Ratio', 'Relación'],
+	'figures.centre': ['Standard centre distance', 'Distancia entre centros estándar'],
+	'figures.angle': ['Operating pressure angle', 'Ángulo de presión de trabajo'],
+	'figures.contact-ratio': ['Contact ratio', 'Relación de contacto'],
+	'figures.backlash': ['Backlash across the flanks', 'Juego entre los flancos'],
+	'figures.hunting': ['Every tooth meets every other', 'Cada diente se junta con todos'],
+	'figures.undercut': ['Undercut', 'Socavado'],
+	'figures.interference': ['Tip interference', 'Interferencia de puntas'],
+	'figures.yes': ['yes', 'sí'],
+	'figures.no': ['no', 'no'],
 	'check-page.working': ['Working', 'Cálculo'],
 	'check-page.working-note': ["the server's own", 'el del servidor'],
 	'check-page.no-working': [

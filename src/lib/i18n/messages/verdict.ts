@@ -14,7 +14,9 @@ export const verdict = {
 		'The middle carries, the bad end does not.',
 		'El valor medio soporta, el extremo malo no.'
 	],
-	'verdict.say.will-not-carry': ['Bending of this gear decides.', 'Decide la flexión de este engrane.'],
+	'verdict.decides.gear-bending': ['Bending of this gear decides.', 'Decide la flexión de este engrane.'],
+	'verdict.decides.mate-bending': ['Bending of the mate decides.', 'Decide la flexión del conjugado.'],
+	'verdict.decides.wear': ['Wear of the pair decides.', 'Decide el desgaste del par.'],
 	'verdict.say.missing': [
 		'Something is missing. Go to its step and give it:',
 		'Falta algo. Vaya a su paso y dé el dato:'
@@ -29,7 +31,36 @@ export const verdict = {
 	'verdict.needs-figure': ['needs {needed}', 'requiere {needed}'],
 	'verdict.plant-needs': ['plant needs', 'la planta requiere'],
 	'verdict.what-limits': ['What limits it', 'Qué lo limita'],
-	'verdict.bending-this': ['Bending, this gear', 'Flexión, este engrane'],
+	'verdict.limit.gear-bending': ['Bending, this gear', 'Flexión, este engrane'],
+	'verdict.limit.mate-bending': ['Bending, the mate', 'Flexión, el conjugado'],
+	'verdict.limit.wear': ['Wear, the pair', 'Desgaste, el par'],
+	'remedy.carries.most': ['It would pass at {what} or less.', 'Pasaría con {what} o menos.'],
+	'remedy.carries.least': ['It would pass at {what} or more.', 'Pasaría con {what} o más.'],
+	'remedy.carries.with': ['It would pass with teeth {what}.', 'Pasaría con dientes {what}.'],
+	'remedy.carries.in': ['It would pass in {what}.', 'Pasaría en {what}.'],
+	'remedy.review.most': [
+		'At {what} or less it would still need review.',
+		'Con {what} o menos aún requeriría revisión.'
+	],
+	'remedy.review.least': [
+		'At {what} or more it would still need review.',
+		'Con {what} o más aún requeriría revisión.'
+	],
+	'remedy.review.with': [
+		'With teeth {what} it would still need review.',
+		'Con dientes {what} aún requeriría revisión.'
+	],
+	'remedy.review.in': ['In {what} it would still need review.', 'En {what} aún requeriría revisión.'],
+	'remedy.margins': [
+		'Margin in bending {margin}, low end {low}.',
+		'Margen a flexión {margin}, extremo bajo {low}.'
+	],
+	'remedy.review-from': ['From there to {what} it needs review.', 'De ahí hasta {what} requiere revisión.'],
+	'remedy.face': ['a face of {width}', 'una cara de {width}'],
+	'remedy.change': ['Change: needs review', 'Cambio: requiere revisión'],
+	'remedy.like-for-like': ['As the original was', 'Como era el original'],
+	'remedy.more': ['{n} more', '{n} más'],
+	'remedy.more#one': ['1 more', '1 más'],
 	'verdict.by-speed': ['What it carries, by speed', 'Lo que soporta, según la velocidad'],
 	'verdict.beyond': ["beyond the plant's margin", 'fuera del margen de la planta'],
 	'verdict.this-drive': ['this drive, {power}', 'este mando, {power}'],

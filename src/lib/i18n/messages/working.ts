@@ -1,100 +1,9 @@
 /**
- * Words for what the calculation core says: its reasons by code, the names of its working lines, and the parts of
- * a source that are prose. Titles of books stay as they are printed. Never "safe", "approved" or "certified".
+ * Words for the working of the calculation core: the names of its lines, and the parts of a source that are prose.
+ * Titles of books stay as they are printed.
  */
 export const working = {
-	'reason.material-not-permitted': [
-		"{material} is not on the plant's list of permitted materials. Choose a permitted one, or ask the supervisor.",
-		'{material} no está en la lista de materiales permitidos de la planta. Elija uno permitido o pregunte al supervisor.'
-	],
-	'reason.bending-margin-short': [
-		'The margin in bending is {margin}, the plant needs {needed}: this gear falls short.',
-		'El margen a flexión es {margin} y la planta requiere {needed}: este engrane no alcanza.'
-	],
-	'reason.bending-margin-low': [
-		'The margin in bending is {margin} and meets the needed {needed}, but at the bad end of the uncertainty it is {low}.',
-		'El margen a flexión es {margin} y cumple el {needed} requerido, pero en el extremo malo de la incertidumbre es {low}.'
-	],
-	'reason.bending-margin': [
-		'The margin in bending is {margin}, and {low} at the bad end of the uncertainty; the plant needs {needed}.',
-		'El margen a flexión es {margin}, y {low} en el extremo malo de la incertidumbre; la planta requiere {needed}.'
-	],
-	'reason.bending-only': [
-		"This version works out bending of this gear's teeth. Wear, and the mate's teeth, are not in it.",
-		'Esta versión calcula la flexión de los dientes de este engrane. No incluye el desgaste ni los dientes del engrane conjugado.'
-	],
-	'reason.out-of-range': [
-		'These values lead to a figure too large or too small to compute with. Check the readings and their units.',
-		'Estos valores llevan a una cifra demasiado grande o pequeña para calcular. Revise las lecturas y sus unidades.'
-	],
-	'reason.missing': [
-		'The {field} is missing: go back to its step and give it.',
-		'Falta este dato: {field}. Vuelva a su paso y proporciónelo.'
-	],
-	'reason.teeth-missing': [
-		'The number of teeth is missing. Count them and give it.',
-		'Falta el número de dientes. Cuéntelos y proporciónelo.'
-	],
-	'reason.speed-missing': [
-		'The speed of this gear is missing. Give it in rpm.',
-		'Falta la velocidad de este engrane. Proporciónela en rpm.'
-	],
-	'reason.load-unknown': [
-		'The load is not known, so there is no stress to compare. Give power or torque, from the nameplate or measured.',
-		'No se conoce la carga, así que no hay esfuerzo que comparar. Dé la potencia o el par, de la placa o medidos.'
-	],
-	'reason.kind-not-covered': [
-		'This version works out spur gears, not a {kind}. Have it rated by an engineer.',
-		'Esta versión calcula engranes rectos; este es otro tipo: {kind}. Pida a un ingeniero que lo evalúe.'
-	],
-	'reason.form-rule-not-covered': [
-		"The plant's rule asks for the form factor by {formFactor}; this version has the handbook table only. A supervisor can set the rule to the handbook table.",
-		'La regla de la planta pide el factor de forma por {formFactor}; esta versión solo tiene la tabla del manual. Un supervisor puede fijar la regla en la tabla del manual.'
-	],
-	'reason.mate-pitch-differs': [
-		'Gear and mate do not mesh: their base pitches are {gear} mm and {mate} mm. Check pitch and pressure angle of both.',
-		'El engrane y su conjugado no engranan: sus pasos base son {gear} mm y {mate} mm. Revise el paso y el ángulo de presión de ambos.'
-	],
-	'reason.speed-beyond-law': [
-		'The pitch-line velocity of {velocity} is beyond {end}, the limit for {law}. Check speed and finish, or have the gear rated by an engineer.',
-		'La velocidad en la línea de paso, {velocity}, supera {end}, el límite para {law}. Revise la velocidad y el acabado, o pida a un ingeniero que lo evalúe.'
-	],
-	'reason.profile-shift-not-covered': [
-		'The handbook table holds teeth without profile shift, this gear has {profileShift} x module. Check the shift, or have the gear rated by an engineer.',
-		'La tabla del manual es para dientes sin corrección de perfil; este engrane tiene {profileShift} x módulo. Revise la corrección, o pida a un ingeniero que lo evalúe.'
-	],
-	'reason.form-not-in-table': [
-		'The handbook table holds full depth at 14.5 and 20 degrees and stub at 20 degrees, not this form at {pressureAngle} degrees. Check angle and form, or have the gear rated by an engineer.',
-		'La tabla del manual tiene profundidad completa a 14.5 y 20 grados y truncado a 20 grados, no esta forma a {pressureAngle} grados. Revise ángulo y forma, o pida a un ingeniero que lo evalúe.'
-	],
-	'reason.too-few-teeth': [
-		'The Lewis method starts at {fewest} teeth, this gear has {teeth}. Count again, or have the gear rated by an engineer.',
-		'El método de Lewis empieza en {fewest} dientes; este engrane tiene {teeth}. Cuente otra vez, o pida a un ingeniero que lo evalúe.'
-	],
-	'reason-short.material-not-permitted': [
-		"{material} is not on the plant's list",
-		'{material} no está en la lista de la planta'
-	],
-	'reason-short.out-of-range': ['Readings or units out of range', 'Lecturas o unidades fuera de rango'],
-	'reason-short.missing': ['Missing: {field}', 'Falta: {field}'],
-	'reason-short.teeth-missing': ['Missing: number of teeth', 'Falta: número de dientes'],
-	'reason-short.speed-missing': ['Missing: speed of this gear', 'Falta: velocidad de este engrane'],
-	'reason-short.load-unknown': ['The load is not known', 'No se conoce la carga'],
-	'reason-short.kind-not-covered': ['Not a spur gear: {kind}', 'No es engrane recto: {kind}'],
-	'reason-short.mate-pitch-differs': ['Gear and mate do not mesh', 'El engrane y su conjugado no engranan'],
-	'reason-short.speed-beyond-law': [
-		'Too fast for {law}: {velocity}',
-		'Demasiado rápido para {law}: {velocity}'
-	],
-	'reason-short.profile-shift-not-covered': ['Has a profile shift', 'Tiene corrección de perfil'],
-	'reason-short.form-not-in-table': ['Tooth form not in the table', 'Forma del diente fuera de la tabla'],
-	'reason-short.too-few-teeth': [
-		'{teeth} teeth; the method starts at {fewest}',
-		'{teeth} dientes; el método empieza en {fewest}'
-	],
-	'form-rule.geometry': ['geometry', 'geometría'],
-	'form-rule.lower-of-both': ['the lower of both methods', 'el menor de ambos métodos'],
-
+	'working-of.mate': ['mate: {name}', 'conjugado: {name}'],
 	'working.module': ['module', 'módulo'],
 	'working.pitch diameter': ['pitch diameter', 'diámetro de paso'],
 	'working.speed of this gear': ['speed of this gear', 'velocidad de este engrane'],
@@ -119,10 +28,6 @@ export const working = {
 	'working.velocity factor, non-metallic law': [
 		'velocity factor, non-metallic',
 		'factor de velocidad, no metálicos'
-	],
-	'working.Lewis form factor, load at the tip': [
-		'Lewis form factor, load at the tip',
-		'factor de forma de Lewis, carga en la punta'
 	],
 	'working.face width': ['face width', 'ancho de cara'],
 	'working.face width of this gear': ['face width of this gear', 'ancho de cara de este engrane'],
@@ -169,9 +74,114 @@ export const working = {
 		"torque at the plant's margin and this speed",
 		'par con el margen de la planta y esta velocidad'
 	],
+	'working.backlash on the operating pitch circle': [
+		'backlash on the operating pitch circle',
+		'juego en el círculo de paso de trabajo'
+	],
+	'working.backlash across the flanks': ['backlash across the flanks', 'juego entre los flancos'],
+	'working.transverse module': ['transverse module', 'módulo transversal'],
+	'working.normal module': ['normal module', 'módulo normal'],
+	'working.virtual teeth in the normal plane': [
+		'virtual teeth in the normal plane',
+		'dientes virtuales en el plano normal'
+	],
+	'working.surface strength by the mean hardness of the pair': [
+		'surface strength by the mean hardness of the pair',
+		'resistencia superficial por la dureza media del par'
+	],
+	'working.ratio factor': ['ratio factor', 'factor de relación'],
+	'working.load-stress factor for these moduli': [
+		'load-stress factor for these moduli',
+		'factor de carga y esfuerzo para estos módulos'
+	],
+	'working.limit load for wear': ['limit load for wear', 'carga límite de desgaste'],
+	'working.Lewis form factor by geometry, load at the tip': [
+		'Lewis form factor by geometry, load at the tip',
+		'factor de forma de Lewis por geometría, carga en la punta'
+	],
+	'working.Lewis form factor by the handbook, load at the tip': [
+		'Lewis form factor by the handbook, load at the tip',
+		'factor de forma de Lewis por el manual, carga en la punta'
+	],
+	'working.Lewis form factor that counts, by the rule of the plant': [
+		'Lewis form factor that counts, by the rule of the plant',
+		'factor de forma de Lewis que cuenta, por la regla de la planta'
+	],
+	'working.thickness of the tooth at its weakest section': [
+		'thickness of the tooth at its weakest section',
+		'espesor del diente en su sección más débil'
+	],
+	'working.height of the load above its weakest section': [
+		'height of the load above its weakest section',
+		'altura de la carga sobre su sección más débil'
+	],
+	'working.what the bad end leaves of the margin': [
+		'what the bad end leaves of the margin',
+		'lo que el extremo malo deja del margen'
+	],
+	'working.ratio': ['ratio', 'relación'],
+	'working.standard centre distance': ['standard centre distance', 'distancia entre centros estándar'],
+	'working.operating pressure angle at the measured centre distance': [
+		'operating pressure angle at the measured centre distance',
+		'ángulo de presión de trabajo a la distancia entre centros medida'
+	],
+	'working.contact ratio, path of contact over base pitch': [
+		'contact ratio, path of contact over base pitch',
+		'relación de contacto, línea de contacto entre paso base'
+	],
+	'working.overlap ratio': ['overlap ratio', 'relación de traslape'],
+	'working.dynamic force that the tooth bears in bending': [
+		'dynamic force that the tooth bears in bending',
+		'fuerza dinámica que el diente soporta a flexión'
+	],
+	'working.velocity of the rack': ['velocity of the rack', 'velocidad de la cremallera'],
+	'working.stress concentration at the fillet, for information': [
+		'stress concentration at the fillet, for information',
+		'concentración de esfuerzo en el filete, como información'
+	],
+	'working.elastic coefficient of the pair': [
+		'elastic coefficient of the pair',
+		'coeficiente elástico del par'
+	],
+	'working.curvature of the flanks at the pitch point': [
+		'curvature of the flanks at the pitch point',
+		'curvatura de los flancos en el punto de paso'
+	],
+	'working.contact stress at the pitch point': [
+		'contact stress at the pitch point',
+		'esfuerzo de contacto en el punto de paso'
+	],
+	'working.dynamic force that the flanks bear, by contact stress': [
+		'dynamic force that the flanks bear, by contact stress',
+		'fuerza dinámica que los flancos soportan, por esfuerzo de contacto'
+	],
+	"working.Poisson's ratio, taken as common for metals": [
+		"Poisson's ratio, taken as common for metals",
+		'relación de Poisson, tomada como común en metales'
+	],
+	'working.margin in wear by contact stress': [
+		'margin in wear by contact stress',
+		'margen a desgaste por esfuerzo de contacto'
+	],
+	'working.margin in wear by limit load': [
+		'margin in wear by limit load',
+		'margen a desgaste por carga límite'
+	],
+	'working.capacity in bending, spare over original': [
+		'capacity in bending, spare over original',
+		'capacidad a flexión, repuesto entre original'
+	],
+	'working.capacity in wear, spare over original': [
+		'capacity in wear, spare over original',
+		'capacidad a desgaste, repuesto entre original'
+	],
+	'working.measurement over two pins': ['measurement over two pins', 'medida sobre dos rodillos'],
+	'working.span over k teeth': ['span over k teeth', 'medida sobre k dientes'],
 
 	'expression.as given': ['as given', 'como se dio'],
 	'expression.table at N': ['table at N', 'tabla en N'],
+	'expression.table, rack': ['table, rack', 'tabla, cremallera'],
+	'expression.from the generated tooth': ['from the generated tooth', 'del diente generado'],
 
 	'source.as given': ['as given', 'como se dio'],
 	'source.definition': ['definition', 'definición'],
@@ -193,6 +203,23 @@ export const working = {
 		'95 % one-sided, normal distribution',
 		'95 % de un lado, distribución normal'
 	],
+	'source.Lewis parabola on the generated tooth': [
+		'Lewis parabola on the generated tooth',
+		'parábola de Lewis en el diente generado'
+	],
+	'source.as in the AGMA 225 tables (from memory)': [
+		'as in the AGMA 225 tables (from memory)',
+		'como en las tablas AGMA 225 (de memoria)'
+	],
+	'source.contact stress by Hertz': ['contact stress by Hertz', 'esfuerzo de contacto de Hertz'],
+	"source.Buckingham's limit load for wear": [
+		"Buckingham's limit load for wear",
+		'carga límite de desgaste de Buckingham'
+	],
+	'source.involute geometry': ['involute geometry', 'geometría de la evolvente'],
+	'source.span over teeth': ['span over teeth', 'medida sobre dientes'],
+	'source.measurement over wires': ['measurement over wires', 'medida sobre alambres'],
+	'source.common practice': ['common practice', 'práctica común'],
 	'source.edition from memory': ['edition from memory', 'edición de memoria'],
 	'source.from memory': ['from memory', 'de memoria']
 } as const satisfies Record<string, readonly [string, string]>;

@@ -3,11 +3,13 @@
  * material and rules. Read at once for a whole batch, before the plant's counter is taken.
  */
 import { and, eq, inArray, isNull } from 'drizzle-orm';
+import type { PlantSide } from '$lib/records/assemble';
 import type { Envelope } from '$lib/records/envelope';
 import type { MaterialStatement } from '$lib/records/material';
 import type { PlantRules } from '$lib/records/plant-rules';
 import type { QuarantineCode } from '$lib/records/protocol';
 import type { Tx } from '../db/client';
+import { offeredMaterials } from '../db/queries/offered-materials';
 import { checks } from '../db/schema/checks';
 import { gearPositions } from '../db/schema/machines';
 import { materialRevisions, plantRules } from '../db/schema/materials';
@@ -25,6 +27,8 @@ export interface RecordContext {
 	machineOfPosition: Map<string, string>;
 	materials: Map<string, MaterialStatement>;
 	rules: Map<number, PlantRules>;
+	/** The list as it stands: each material in its last revision. */
+	offered: MaterialStatement[];
 }
 
 export async function contextOf(tx: Tx, plantId: string, records: Envelope[]): Promise<RecordContext> {
@@ -35,7 +39,8 @@ export async function contextOf(tx: Tx, plantId: string, records: Envelope[]): P
 		authors: new Set(),
 		machineOfPosition: new Map(),
 		materials: new Map(),
-		rules: new Map()
+		rules: new Map(),
+		offered: []
 	};
 	if (!records.length) return empty;
 
@@ -83,7 +88,8 @@ export async function contextOf(tx: Tx, plantId: string, records: Envelope[]): P
 		authors: new Set(authors.map((row) => row.id)),
 		machineOfPosition: new Map(positions.map((row) => [row.id, row.machineId])),
 		materials: new Map(materials.map((row) => [revisionKey(row.materialId, row.revision), row.statement])),
-		rules: new Map(rules.map((row) => [row.revision, row.rules]))
+		rules: new Map(rules.map((row) => [row.revision, row.rules])),
+		offered: await offeredMaterials(tx, plantId)
 	};
 }
 
@@ -99,9 +105,7 @@ export async function keptRows(tx: Tx, plantId: string, ids: string[]): Promise<
 export function placeRecord(
 	{ authorId, body }: Envelope,
 	context: RecordContext
-):
-	| { ok: true; material: MaterialStatement | null; rules: PlantRules }
-	| { ok: false; code: QuarantineCode; text: string } {
+): { ok: true; plantSide: PlantSide } | { ok: false; code: QuarantineCode; text: string } {
 	const refuse = (code: QuarantineCode, text: string) => ({ ok: false, code, text }) as const;
 	if (!context.authors.has(authorId.toLowerCase())) {
 		return refuse('author-not-here', 'Its author does not work at this plant, or no longer does.');
@@ -122,7 +126,7 @@ export function placeRecord(
 	}
 	const rules = context.rules.get(body.rulesRevision);
 	if (!rules) return refuse('unknown-rules', 'This plant has no such revision of its rules.');
-	return { ok: true, material, rules };
+	return { ok: true, plantSide: { material, rules, offered: context.offered } };
 }
 
 function revisionKey(id: string, revision: number): string {

@@ -82,7 +82,7 @@ async function prepare(tx: Tx, plantId: string, intakes: Intake[]): Promise<(Pre
 		if (!place.ok) return unstorable(intake, place.code, place.text);
 		try {
 			const { answers } = record.body;
-			const outcome = answerCheck(answers, place.material, place.rules, record.performedAt);
+			const outcome = answerCheck(answers, place.plantSide, record.performedAt);
 			return { kind: 'new', intake, outcome };
 		} catch (failure) {
 			logFailure('check computed again', failure);

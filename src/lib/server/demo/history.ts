@@ -54,6 +54,10 @@ export function pushes(
 		const material = known(materials, check.material);
 		const revisions = material.revisions.filter((revision) => revision.at <= performedAt);
 		const answers = answersOf(plant, plan.position, check, { materialId: material.id, performedAt, random });
+		const offered = [...materials.values()].flatMap(
+			(one) => one.revisions.findLast((revision) => revision.at <= performedAt)?.statement ?? []
+		);
+		const plantSide = { material: revisions.at(-1)!.statement, rules: plant.rules, offered };
 		const moment = performedAt.toISOString();
 		const happen = async () => {
 			const unhashed: Unhashed = {
@@ -74,7 +78,7 @@ export function pushes(
 					answers,
 					materialRevision: revisions.length,
 					rulesRevision: 1,
-					outcome: answerCheck(answers, revisions.at(-1)!.statement, plant.rules, moment)
+					outcome: answerCheck(answers, plantSide, moment)
 				}
 			};
 			const record = { ...unhashed, hash: await envelopeHash({ ...unhashed }) };

@@ -1,0 +1,16 @@
+/** What limits a check, row by row: the answer that decides first. */
+import type { Limit, Outcome } from '$lib/gear/contract';
+
+/**
+ * The limits of an outcome with the deciding one first. An outcome of a core before 1.0.0 names none; it knew bending
+ * of this gear only.
+ */
+export function limitRows(
+	{ limits = [], limitedBy, bendingMargin: margin, bendingMarginLow: marginLow }: Outcome,
+	needed: number
+): Limit[] {
+	if (limits.length > 0) {
+		return [...limits].sort((a, b) => Number(b.answer === limitedBy) - Number(a.answer === limitedBy));
+	}
+	return margin === null || marginLow === null ? [] : [{ answer: 'gear-bending', margin, marginLow, needed }];
+}

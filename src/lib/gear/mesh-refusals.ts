@@ -1,0 +1,61 @@
+/** Why two members do not mesh at all: it comes before any strength. Lengths in mm. */
+import type { Reason } from './contract';
+import type { Member } from './member';
+
+/** Two gears of the same standard pitch agree far better than this, two of neighbouring pitches far worse. */
+const SAME_BASE_PITCH = 0.002;
+
+/** Radians; half a degree is what a protractor tells apart. */
+const SAME_HELIX = (0.5 * Math.PI) / 180;
+
+/** A mate of another base pitch does not mesh, whatever the strength. Compared in the normal plane. */
+export function basePitchRefusal(gear: Member, mate: Member): Reason | null {
+	const basePitch = ({ normalModule, normalAngle }: Member) => Math.PI * normalModule * Math.cos(normalAngle);
+	const [own, mates] = [basePitch(gear), basePitch(mate)];
+	if (Math.abs(mates / own - 1) <= SAME_BASE_PITCH) return null;
+	return {
+		code: 'mate-pitch-differs',
+		text: `Gear and mate do not mesh: their base pitches are ${own.toFixed(3)} mm and ${mates.toFixed(3)} mm. Check pitch and pressure angle of both.`,
+		values: { gear: own, mate: mates }
+	};
+}
+
+export function helixRefusal(gear: Member, mate: Member): Reason | null {
+	if (Math.abs(gear.helixAngle - mate.helixAngle) <= SAME_HELIX) return null;
+	return {
+		code: 'mate-helix-differs',
+		text: 'Gear and mate do not mesh on parallel shafts: their helix angles differ. Check the helix angle of both.'
+	};
+}
+
+export function kindsRefusal(gear: Member, mate: Member): Reason | null {
+	const kinds = [gear.kind, mate.kind];
+	if (kinds.every((kind) => kind === 'internal' || kind === 'rack')) {
+		return {
+			code: 'kinds-do-not-mesh',
+			text: 'Racks and internal gears mesh with an external gear only. Check the kind of both.'
+		};
+	}
+	const inner = kinds.indexOf('internal');
+	if (inner === -1) return null;
+	const [internal, pinion] = inner === 0 ? [gear, mate] : [mate, gear];
+	if ((internal.teeth ?? 0) > (pinion.teeth ?? 0)) return null;
+	return {
+		code: 'internal-too-small',
+		text: 'An internal gear has more teeth than the pinion that runs in it. Check both counts.'
+	};
+}
+
+export const CENTRES_TOO_CLOSE: Reason = {
+	code: 'centres-too-close',
+	text: 'At this centre distance the two cannot stand: their base circles overlap. Check the centre distance and both counts.'
+};
+
+export function discontinuousRefusal(contactRatio: number): Reason | null {
+	if (contactRatio >= 1) return null;
+	return {
+		code: 'contact-ratio-below-one',
+		text: `One pair of teeth leaves before the next meets: the contact ratio is ${contactRatio.toFixed(2)}, it must be above 1. Check centre distance, tooth form and wear of the tips.`,
+		values: { contactRatio }
+	};
+}

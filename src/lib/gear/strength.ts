@@ -1,0 +1,166 @@
+/**
+ * What one member's teeth bear in bending: its form factor by the plant's rule, and the dynamic force that brings it
+ * to its allowable stress. The same for the gear, its mate and the original.
+ */
+import type { Material, Outcome, Reason, Rules, ToothForm } from './contract';
+import { bendingMargin, lewisBeamStrength, lewisBendingStress, reversingAllowable } from './bending';
+import { fewTeethRefusal, handbookHolds, lewisFormFactor } from './form-factor';
+import { lewisFormFactorByGeometry, rackFormFactor } from './form-factor-geometry';
+import { virtualTeeth, type Member } from './member';
+import { SOURCES } from './sources';
+import { stressConcentration } from './stress-concentration';
+import type { Recorder } from './working';
+
+type FormFactorFigures = Pick<
+	Outcome,
+	'formFactor' | 'formFactorSource' | 'formFactorHandbook' | 'formFactorGeometry' | 'stressConcentration'
+>;
+
+export interface FormFactorAnswer {
+	figures: FormFactorFigures;
+	refusal: Reason | null;
+}
+
+/**
+ * Form factor Y of a member by both methods as far as each reaches, and the one that the rule takes. `handbook` takes
+ * the table where it holds the form and the geometry for every other; `lower-of-both` the lower. A rack and an
+ * internal gear have the rack's factor: for the internal gear a lower bound, since its teeth widen at the root.
+ */
+export function formFactorOf(
+	member: Member,
+	form: ToothForm,
+	rule: Rules['formFactor'],
+	recorder: Recorder
+): FormFactorAnswer {
+	const asRack = member.teeth === null || member.kind === 'internal';
+	const refusedCount = asRack || member.teeth === null ? null : fewTeethRefusal(member.teeth);
+	if (refusedCount) return { figures: NO_FORM_FACTOR, refusal: refusedCount };
+	const teeth =
+		asRack || member.teeth === null ? Infinity : virtualTeeth(member.teeth, member.helixAngle, recorder);
+
+	const tooth = {
+		teeth,
+		pressureAngle: (member.normalAngle * 180) / Math.PI,
+		form,
+		profileShift: asRack ? 0 : member.profileShift,
+		tipWorn: member.tipWear > 0
+	};
+	const handbook = handbookHolds(tooth) ? lewisFormFactor(tooth, recorder) : null;
+	const tipWear = member.tipWear / member.normalModule;
+	const byGeometry = asRack
+		? rackFormFactor(member.rack, tipWear, recorder)
+		: lewisFormFactorByGeometry(
+				{ teeth, rack: member.rack, profileShift: member.profileShift, tipWear },
+				recorder
+			);
+	const section = 'Y' in byGeometry ? byGeometry : null;
+	const geometry = section?.Y ?? null;
+	const figures = {
+		formFactorHandbook: handbook,
+		formFactorGeometry: geometry,
+		stressConcentration: section && stressConcentration(section, member.normalAngle, recorder)
+	};
+	const taken = takenSource(rule, handbook, geometry);
+	if (!taken) {
+		const refusal = 'code' in byGeometry ? byGeometry : null;
+		return { figures: { ...NO_FORM_FACTOR, ...figures }, refusal };
+	}
+	const formFactor = recorder.step(
+		{ ...DECIDES, expression: taken.expression },
+		{ Yh: handbook ?? 0, Yg: geometry ?? 0 },
+		({ Yh, Yg }) => (taken.source === 'handbook' ? Yh : Yg)
+	);
+	return { figures: { ...figures, formFactor, formFactorSource: taken.source }, refusal: null };
+}
+
+const NO_FORM_FACTOR: FormFactorFigures = {
+	formFactor: null,
+	formFactorSource: null,
+	formFactorHandbook: null,
+	formFactorGeometry: null,
+	stressConcentration: null
+};
+
+const DECIDES = {
+	symbol: 'Y',
+	name: 'Lewis form factor that counts, by the rule of the plant',
+	unit: '1',
+	source: SOURCES.plantRule
+};
+
+interface Taken {
+	source: 'handbook' | 'geometry';
+	expression: string;
+}
+
+function takenSource(
+	rule: Rules['formFactor'],
+	handbook: number | null,
+	geometry: number | null
+): Taken | null {
+	if (rule === 'handbook' && handbook !== null) return { source: 'handbook', expression: 'Yh' };
+	// A rule that asks for the lower of both cannot be met by the table alone.
+	if (geometry === null) return null;
+	if (rule === 'lower-of-both' && handbook !== null) {
+		return { source: handbook <= geometry ? 'handbook' : 'geometry', expression: 'min(Yh, Yg)' };
+	}
+	return { source: 'geometry', expression: 'Yg' };
+}
+
+export interface BendingAnswer {
+	/** Dynamic force in N that the teeth bear; null without a form factor. */
+	strength: number | null;
+	figures: { allowableBending: number; bendingStress: number | null; bendingMargin: number | null };
+}
+
+/** Stress and margin of a member's teeth under the design force (N); null as far as force or factors are not known. */
+export function memberBending(
+	{ member, material, faceWidth, formFactor }: BendingMember,
+	{ rules, reversing, designForce, velocityFactor }: BendingDrive,
+	recorder: Recorder
+): BendingAnswer {
+	const allowable = allowableBending(material, reversing, rules, recorder);
+	const none = { allowableBending: allowable, bendingStress: null, bendingMargin: null };
+	if (formFactor === null) return { strength: null, figures: none };
+	const tooth = { faceWidth, module: member.normalModule, formFactor };
+	const strength = lewisBeamStrength(allowable, tooth, recorder);
+	if (designForce === null || velocityFactor === null) return { strength, figures: none };
+	const stress = lewisBendingStress(designForce, { ...tooth, velocityFactor }, recorder);
+	return {
+		strength,
+		figures: {
+			allowableBending: allowable,
+			bendingStress: stress,
+			bendingMargin: bendingMargin(allowable, stress, recorder)
+		}
+	};
+}
+
+export interface BendingMember {
+	member: Member;
+	material: Material;
+	/** The smaller of the pair, mm. */
+	faceWidth: number;
+	formFactor: number | null;
+}
+
+export interface BendingDrive {
+	rules: Rules;
+	reversing: boolean;
+	/** N, service factor in. */
+	designForce: number | null;
+	velocityFactor: number | null;
+}
+
+/** Less where both flanks are loaded in turn. MPa. */
+function allowableBending(
+	material: Material,
+	reversing: boolean,
+	{ reversingFactor }: Rules,
+	recorder: Recorder
+): number {
+	const symbol = reversing ? 'Sa' : 'Sb';
+	const line = { symbol, name: 'allowable bending stress of the material', unit: 'MPa' };
+	const allowable = recorder.given(line, material.allowableBending);
+	return reversing ? reversingAllowable(allowable, reversingFactor, recorder) : allowable;
+}

@@ -1,0 +1,173 @@
+/**
+ * What the flanks of a pair bear, and the margins it leaves: Hertz at the pitch point and Buckingham's limit load. One
+ * answer for both members, since the published limit goes by the mean of their hardnesses. Null where materials,
+ * moduli or hardnesses are not known.
+ */
+import type { Material, Outcome, Reason } from './contract';
+import {
+	BRINELL_RANGE,
+	buckinghamLoadStressFactor,
+	buckinghamRatioFactor,
+	buckinghamSurfaceStrength,
+	buckinghamWearLoad
+} from './buckingham';
+import {
+	elasticCoefficient,
+	hertzContactStress,
+	hertzLoad,
+	pitchPointCurvature,
+	type Elastic
+} from './hertz';
+import type { Member } from './member';
+import { toSI } from './quantity';
+import { SOURCES } from './sources';
+import type { Recorder } from './working';
+
+export interface WearQuestion {
+	gear: Member;
+	mate: Member;
+	/** The smaller of the pair, mm. */
+	faceWidth: number;
+	gearMaterial: Material;
+	mateMaterial: Material | undefined;
+	/** N, velocity and service factors in; null where the load is not known. */
+	dynamicForce: number | null;
+}
+
+export interface WearAnswer {
+	/** Dynamic force in N that the flanks bear: the lower of Hertz and Buckingham. */
+	strength: number | null;
+	figures: Outcome['wear'];
+	refusal: Reason | null;
+}
+
+export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
+	const none: WearAnswer = { strength: null, figures: null, refusal: null };
+	const { gear, mate, faceWidth, dynamicForce } = question;
+	const wheels = pinionAndWheel(gear, mate);
+	const [own, mates] = [surfaceOf(question.gearMaterial), surfaceOf(question.mateMaterial)];
+	if (!wheels || !own || !mates) return none;
+	const refusal = wearRefusal(own, mates);
+	if (refusal) return { ...none, refusal };
+
+	const { pinion, wheel, internal } = wheels;
+	const allowable = buckinghamSurfaceStrength(own.brinell, mates.brinell, recorder);
+	const [elasticOwn, elasticMates] = [elasticOf(own, recorder), elasticOf(mates, recorder.mate())];
+	const angle = gear.normalAngle;
+	const { helixAngle } = gear;
+	const line = {
+		elastic: elasticCoefficient(elasticOwn, elasticMates, recorder),
+		faceWidth,
+		angle,
+		curvature: pitchPointCurvature(
+			pinion.diameter,
+			wheel?.diameter ?? null,
+			{ angle, helixAngle, internal },
+			recorder
+		)
+	};
+	const byContact = hertzLoad(allowable, line, recorder);
+	const wearLoad = buckinghamWearLoad(
+		{
+			pinion: pinion.diameter,
+			faceWidth,
+			ratioFactor: buckinghamRatioFactor(pinion.teeth, wheel?.teeth ?? null, internal, recorder),
+			loadStress: buckinghamLoadStressFactor(
+				allowable,
+				angle,
+				elasticOwn.modulus,
+				elasticMates.modulus,
+				recorder
+			),
+			helixAngle
+		},
+		recorder
+	);
+	const strength = Math.min(byContact, wearLoad);
+	if (dynamicForce === null) return { strength, figures: null, refusal: null };
+
+	const margin = (symbol: string, name: string, expression: string, bears: number) =>
+		recorder.step(
+			{ symbol, name, expression, unit: '1', source: SOURCES.definition },
+			{ Wh: bears, Fw: bears, W: dynamicForce },
+			({ Wh, W }) => Wh / W
+		);
+	const figures = {
+		contactStress: hertzContactStress(dynamicForce, line, recorder),
+		allowableContact: allowable,
+		contactMargin: margin('Mc', 'margin in wear by contact stress', 'Wh / W', byContact),
+		wearLoad,
+		wearLoadMargin: margin('Mw', 'margin in wear by limit load', 'Fw / W', wearLoad)
+	};
+	return { strength, figures, refusal: null };
+}
+
+interface Wheel {
+	teeth: number;
+	diameter: number;
+}
+
+/** The smaller is the pinion; a rack has no wheel. Null where the two cannot roll on each other. */
+function pinionAndWheel(
+	gear: Member,
+	mate: Member
+): { pinion: Wheel; wheel: Wheel | null; internal: boolean } | null {
+	const wheels = [gear, mate]
+		.flatMap(({ teeth, pitchDiameter: diameter }) =>
+			teeth === null || diameter === null ? [] : [{ teeth, diameter }]
+		)
+		.sort((a, b) => a.teeth - b.teeth);
+	const [pinion, wheel = null] = wheels;
+	const internal = gear.kind === 'internal' || mate.kind === 'internal';
+	if (!pinion || (internal && (!wheel || wheel.teeth <= pinion.teeth))) return null;
+	return { pinion, wheel, internal };
+}
+
+interface Surface {
+	metallic: boolean;
+	brinell: number;
+	/** MPa. */
+	modulus: number;
+	poisson: number | undefined;
+}
+
+function surfaceOf(material: Material | undefined): Surface | null {
+	if (!material?.modulus || material.brinell === undefined) return null;
+	const { metallic, brinell, modulus, poisson } = material;
+	return { metallic, brinell, modulus: toSI(modulus), poisson };
+}
+
+/** Common practice: metals lie between 0.21 (grey iron) and 0.35 (bronze), and the square of it counts. */
+const COMMON_POISSON = 0.3;
+
+function elasticOf({ modulus, poisson }: Surface, recorder: Recorder): Elastic {
+	if (poisson !== undefined) return { modulus, poisson };
+	const common = recorder.step(
+		{
+			symbol: 'ν',
+			name: "Poisson's ratio, taken as common for metals",
+			expression: '0.3',
+			unit: '1',
+			source: SOURCES.commonPractice
+		},
+		{},
+		() => COMMON_POISSON
+	);
+	return { modulus, poisson: common };
+}
+
+function wearRefusal(own: Surface, mates: Surface): Reason | null {
+	if (!own.metallic || !mates.metallic) {
+		return {
+			code: 'wear-not-for-plastics',
+			text: 'The wear limit is for metal on metal; one of these is not metallic. Have the wear judged by an engineer.'
+		};
+	}
+	const brinell = (own.brinell + mates.brinell) / 2;
+	if (brinell >= BRINELL_RANGE.from && brinell <= BRINELL_RANGE.to) return null;
+	return {
+		code: 'wear-out-of-range',
+		text: `The wear limit holds for a mean Brinell hardness of ${BRINELL_RANGE.from} to ${BRINELL_RANGE.to}; of this pair it is ${Math.round(brinell)}. Check both hardnesses, or have the wear judged by an engineer.`,
+		values: { brinell, from: BRINELL_RANGE.from, to: BRINELL_RANGE.to }
+	};
+}

@@ -1,0 +1,252 @@
+/**
+ * Words for the reasons that the calculation core gives, by code: the whole sentence, and a short one for a row of a
+ * table. Never "safe", "approved" or "certified".
+ */
+export const reasons = {
+	'reason.material-not-permitted': [
+		"{material} is not on the plant's list of permitted materials. Choose a permitted one, or ask the supervisor.",
+		'{material} no está en la lista de materiales permitidos de la planta. Elija uno permitido o pregunte al supervisor.'
+	],
+	'reason.bending-margin-short': [
+		'The margin in bending is {margin}, the plant needs {needed}: this gear falls short.',
+		'El margen a flexión es {margin} y la planta requiere {needed}: este engrane no alcanza.'
+	],
+	'reason.bending-margin-low': [
+		'The margin in bending is {margin} and meets the needed {needed}, but at the bad end of the uncertainty it is {low}.',
+		'El margen a flexión es {margin} y cumple el {needed} requerido, pero en el extremo malo de la incertidumbre es {low}.'
+	],
+	'reason.bending-margin': [
+		'The margin in bending is {margin}, and {low} at the bad end of the uncertainty; the plant needs {needed}.',
+		'El margen a flexión es {margin}, y {low} en el extremo malo de la incertidumbre; la planta requiere {needed}.'
+	],
+	'reason.out-of-range': [
+		'These values lead to a figure too large or too small to compute with. Check the readings and their units.',
+		'Estos valores llevan a una cifra demasiado grande o pequeña para calcular. Revise las lecturas y sus unidades.'
+	],
+	'reason.missing': [
+		'The {field} is missing: go back to its step and give it.',
+		'Falta este dato: {field}. Vuelva a su paso y proporciónelo.'
+	],
+	'reason.teeth-missing': [
+		'The number of teeth is missing. Count them and give it.',
+		'Falta el número de dientes. Cuéntelos y proporciónelo.'
+	],
+	'reason.speed-missing': [
+		'The speed of this gear is missing. Give it in rpm.',
+		'Falta la velocidad de este engrane. Proporciónela en rpm.'
+	],
+	'reason.load-unknown': [
+		'The load is not known, so there is no stress to compare. Give power or torque, from the nameplate or measured.',
+		'No se conoce la carga, así que no hay esfuerzo que comparar. Dé la potencia o el par, de la placa o medidos.'
+	],
+	'reason.mate-pitch-differs': [
+		'Gear and mate do not mesh: their base pitches are {gear} mm and {mate} mm. Check pitch and pressure angle of both.',
+		'El engrane y su conjugado no engranan: sus pasos base son {gear} mm y {mate} mm. Revise el paso y el ángulo de presión de ambos.'
+	],
+	'reason.speed-beyond-law': [
+		'The pitch-line velocity of {velocity} is beyond {end}, the limit for {law}. Check speed and finish, or have the gear rated by an engineer.',
+		'La velocidad en la línea de paso, {velocity}, supera {end}, el límite para {law}. Revise la velocidad y el acabado, o pida a un ingeniero que lo evalúe.'
+	],
+	'reason.too-few-teeth': [
+		'The Lewis method starts at {fewest} teeth, this gear has {teeth}. Count again, or have the gear rated by an engineer.',
+		'El método de Lewis empieza en {fewest} dientes; este engrane tiene {teeth}. Cuente otra vez, o pida a un ingeniero que lo evalúe.'
+	],
+	'reason.kind-needs-review': [
+		'The method is for spur gears; for this kind ({kind}) it gives a first look only. An engineer should review it.',
+		'El método es para engranes rectos; para este tipo ({kind}) da solo una primera idea. Un ingeniero debe revisarlo.'
+	],
+	'reason.bending-only': [
+		"This is bending of this gear's teeth only. For wear and for the mate's teeth, give the mate with its form, material and hardness.",
+		'Esto es solo la flexión de los dientes de este engrane. Para el desgaste y los dientes del conjugado, dé el conjugado con su forma, material y dureza.'
+	],
+	'reason.wear-not-known': [
+		'Wear is not in this verdict: give modulus and hardness of both materials.',
+		'El desgaste no entra en este veredicto: dé módulo y dureza de ambos materiales.'
+	],
+	'reason.mate-bending-not-known': [
+		"Bending of the mate's teeth is not in this verdict: give its tooth form and material.",
+		'La flexión de los dientes del conjugado no entra en este veredicto: dé su forma de diente y su material.'
+	],
+	'reason.wear-margin-short': [
+		'The margin in wear is {margin}, the plant needs {needed}: the flanks of the pair fall short.',
+		'El margen a desgaste es {margin} y la planta requiere {needed}: los flancos del par no alcanzan.'
+	],
+	'reason.wear-margin-low': [
+		'The margin in wear is {margin} and meets the needed {needed}, but at the bad end of the uncertainty it is {low}.',
+		'El margen a desgaste es {margin} y cumple el {needed} requerido, pero en el extremo malo de la incertidumbre es {low}.'
+	],
+	'reason.wear-margin': [
+		'The margin in wear is {margin}, and {low} at the bad end of the uncertainty; the plant needs {needed}.',
+		'El margen a desgaste es {margin}, y {low} en el extremo malo de la incertidumbre; la planta requiere {needed}.'
+	],
+	'reason.mate-bending-margin-short': [
+		"The margin in bending of the mate's teeth is {margin}, the plant needs {needed}: the mate falls short.",
+		'El margen a flexión de los dientes del conjugado es {margin} y la planta requiere {needed}: el conjugado no alcanza.'
+	],
+	'reason.mate-bending-margin-low': [
+		"The margin in bending of the mate's teeth is {margin} and meets the needed {needed}, but at the bad end of the uncertainty it is {low}.",
+		'El margen a flexión de los dientes del conjugado es {margin} y cumple el {needed} requerido, pero en el extremo malo de la incertidumbre es {low}.'
+	],
+	'reason.mate-bending-margin': [
+		"The margin in bending of the mate's teeth is {margin}, and {low} at the bad end of the uncertainty; the plant needs {needed}.",
+		'El margen a flexión de los dientes del conjugado es {margin}, y {low} en el extremo malo de la incertidumbre; la planta requiere {needed}.'
+	],
+	'reason.compared': [
+		'The spare carries {bending} % of what the original gear carried in bending and {wear} % in wear.',
+		'El repuesto soporta el {bending} % de lo que soportaba el engrane original a flexión y el {wear} % a desgaste.'
+	],
+	'reason.compared-bending': [
+		'The spare carries {bending} % of what the original gear carried in bending.',
+		'El repuesto soporta el {bending} % de lo que soportaba el engrane original a flexión.'
+	],
+	'reason.original-not-comparable': [
+		'The original gear cannot be compared: one of the two is outside the method, or the speed is missing and their finish or size differs. Check what is given of the original.',
+		'El engrane original no se puede comparar: uno de los dos queda fuera del método, o falta la velocidad y difieren en acabado o tamaño. Revise los datos del original.'
+	],
+	'reason.velocity-missing': [
+		'The velocity of the rack is missing. Give it in m/s or ft/min.',
+		'Falta la velocidad de la cremallera. Proporciónela en m/s o ft/min.'
+	],
+	'reason.torque-on-rack': [
+		'A rack turns no shaft, so a torque gives no force on it. Give the power, or the force along the rack.',
+		'Una cremallera no gira ningún eje, así que un par no le da fuerza. Dé la potencia o la fuerza a lo largo de la cremallera.'
+	],
+	'reason.angle-not-covered': [
+		'The form factor by geometry reaches from 14.5 to 25 degrees, this tooth has {pressureAngle} in its normal plane. Check the pressure angle, or have the gear rated by an engineer.',
+		'El factor de forma por geometría llega de 14.5 a 25 grados; este diente tiene {pressureAngle} en su plano normal. Revise el ángulo de presión, o pida a un ingeniero que lo evalúe.'
+	],
+	'reason.rack-tip-too-round': [
+		"The tooth form's tip radius and dedendum leave its rack no tip. Check addendum, dedendum and tip radius.",
+		'El radio de punta y el dedendo de esta forma no dejan punta a su cremallera. Revise adendo, dedendo y radio de punta.'
+	],
+	'reason.shift-too-large': [
+		'With this profile shift the rack no longer reaches below the pitch circle. Check the shift.',
+		'Con esta corrección de perfil la cremallera ya no llega por debajo del círculo de paso. Revise la corrección.'
+	],
+	'reason.undercut-too-deep': [
+		'The teeth are undercut so deep that no flank is left below the pitch circle: the method ends. Check teeth, angle and shift, or have the gear rated by an engineer.',
+		'Los dientes están tan socavados que no queda flanco bajo el círculo de paso: el método termina. Revise dientes, ángulo y corrección, o pida a un ingeniero que lo evalúe.'
+	],
+	'reason.tip-worn-away': [
+		'The tips are worn below the beginning of the flank: no tooth is left to work out. Check the wear of the tips.',
+		'Las puntas están gastadas por debajo del inicio del flanco: no queda diente que calcular. Revise el desgaste de las puntas.'
+	],
+	'reason.tooth-pointed': [
+		'The flanks of these teeth meet below the tip circle. Check addendum and profile shift.',
+		'Los flancos de estos dientes se juntan antes del círculo exterior. Revise el adendo y la corrección de perfil.'
+	],
+	'reason.tooth-too-short': [
+		'These teeth are so short that the load at the tip does not bend them: the method ends. Check addendum and dedendum.',
+		'Estos dientes son tan cortos que la carga en la punta no los flexiona: el método termina. Revise adendo y dedendo.'
+	],
+	'reason.mate-helix-differs': [
+		'Gear and mate do not mesh on parallel shafts: their helix angles differ. Check the helix angle of both.',
+		'El engrane y su conjugado no engranan en ejes paralelos: sus ángulos de hélice difieren. Revise el ángulo de hélice de ambos.'
+	],
+	'reason.kinds-do-not-mesh': [
+		'Racks and internal gears mesh with an external gear only. Check the kind of both.',
+		'Las cremalleras y los engranes interiores solo engranan con un engrane exterior. Revise el tipo de ambos.'
+	],
+	'reason.internal-too-small': [
+		'An internal gear has more teeth than the pinion that runs in it. Check both counts.',
+		'Un engrane interior tiene más dientes que el piñón que gira en él. Revise ambos conteos.'
+	],
+	'reason.centres-too-close': [
+		'At this centre distance the two cannot stand: their base circles overlap. Check the centre distance and both counts.',
+		'A esta distancia entre centros no caben: sus círculos base se traslapan. Revise la distancia entre centros y ambos conteos.'
+	],
+	'reason.contact-ratio-below-one': [
+		'One pair of teeth leaves before the next meets: the contact ratio is {contactRatio}, it must be above 1. Check centre distance, tooth form and wear of the tips.',
+		'Un par de dientes se separa antes de que se junte el siguiente: la relación de contacto es {contactRatio} y debe pasar de 1. Revise la distancia entre centros, la forma y el desgaste de las puntas.'
+	],
+	'reason.contact-ratio-low': [
+		'The contact ratio is {contactRatio}; below 1.2 the teeth take over badly. Check the centre distance and the wear of the tips; an engineer should review it.',
+		'La relación de contacto es {contactRatio}; por debajo de 1.2 los dientes se relevan mal. Revise la distancia entre centros y el desgaste de las puntas; un ingeniero debe revisarlo.'
+	],
+	'reason.contact-ratio-modest': [
+		'The contact ratio is {contactRatio}; 1.4 or more is preferred.',
+		'La relación de contacto es {contactRatio}; se prefiere 1.4 o más.'
+	],
+	'reason.undercut': [
+		'The teeth of the smaller gear are undercut at the root, where the tips of its mate reach. A hobbed gear has room there; one of another make may not.',
+		'Los dientes del engrane menor están socavados en la raíz, hasta donde llegan las puntas de su conjugado. Un engrane tallado por fresa madre tiene espacio ahí; otro quizá no.'
+	],
+	'reason.interference': [
+		'The tips of one gear reach below the flank of the other: they dig in unless the tips are relieved. Check counts, tooth form and centre distance.',
+		'Las puntas de un engrane llegan por debajo del flanco del otro: se clavan si no están rebajadas. Revise conteos, forma y distancia entre centros.'
+	],
+	'reason.no-backlash': [
+		'The teeth are {jam} mm too thick for this centre distance: they jam. Check the centre distance and the tooth thicknesses.',
+		'Los dientes son {jam} mm demasiado gruesos para esta distancia entre centros: se traban. Revise la distancia entre centros y los espesores.'
+	],
+	'reason.backlash-below-range': [
+		'The backlash is {backlash} mm; at least {least} mm is recommended. Check the centre distance.',
+		'El juego es de {backlash} mm; se recomienda al menos {least} mm. Revise la distancia entre centros.'
+	],
+	'reason.backlash-above-range': [
+		'The backlash is {backlash} mm; at most {most} mm is recommended. Look for wear of the flanks and the bearings.',
+		'El juego es de {backlash} mm; se recomienda como máximo {most} mm. Busque desgaste en los flancos y los rodamientos.'
+	],
+	'reason.hardness-reversed': [
+		'The wheel is harder ({wheel} HB) than the pinion ({pinion} HB). Usual is a hard pinion on a softer wheel: check which is which.',
+		'La rueda es más dura ({wheel} HB) que el piñón ({pinion} HB). Lo usual es un piñón duro con una rueda más blanda: revise cuál es cuál.'
+	],
+	'reason.mate-worn': [
+		'The mate is worn: a new gear on worn flanks wears fast and runs rough. Consider renewing both.',
+		'El conjugado está gastado: un engrane nuevo sobre flancos gastados se desgasta pronto y marcha áspero. Considere renovar ambos.'
+	],
+	'reason.mate-finish-rougher': [
+		"The mate's teeth are rougher than this gear's: the dynamic load is then nearer to that of the mate's finish. Answer the check with the mate's finish as well.",
+		'Los dientes del conjugado son más bastos que los de este engrane: la carga dinámica se acerca entonces a la del acabado del conjugado. Responda la revisión también con ese acabado.'
+	],
+	'reason.wear-not-for-plastics': [
+		'The wear limit is for metal on metal; one of these is not metallic. Have the wear judged by an engineer.',
+		'El límite de desgaste es para metal con metal; uno de estos no es metálico. Pida a un ingeniero que juzgue el desgaste.'
+	],
+	'reason.wear-out-of-range': [
+		'The wear limit holds for a mean Brinell hardness of {from} to {to}; of this pair it is {brinell}. Check both hardnesses, or have the wear judged by an engineer.',
+		'El límite de desgaste vale para una dureza Brinell media de {from} a {to}; la de este par es {brinell}. Revise ambas durezas, o pida a un ingeniero que juzgue el desgaste.'
+	],
+	'reason-short.material-not-permitted': [
+		"{material} is not on the plant's list",
+		'{material} no está en la lista de la planta'
+	],
+	'reason-short.out-of-range': ['Readings or units out of range', 'Lecturas o unidades fuera de rango'],
+	'reason-short.missing': ['Missing: {field}', 'Falta: {field}'],
+	'reason-short.teeth-missing': ['Missing: number of teeth', 'Falta: número de dientes'],
+	'reason-short.speed-missing': ['Missing: speed of this gear', 'Falta: velocidad de este engrane'],
+	'reason-short.load-unknown': ['The load is not known', 'No se conoce la carga'],
+	'reason-short.mate-pitch-differs': ['Gear and mate do not mesh', 'El engrane y su conjugado no engranan'],
+	'reason-short.speed-beyond-law': [
+		'Too fast for {law}: {velocity}',
+		'Demasiado rápido para {law}: {velocity}'
+	],
+	'reason-short.too-few-teeth': [
+		'{teeth} teeth; the method starts at {fewest}',
+		'{teeth} dientes; el método empieza en {fewest}'
+	],
+	'reason-short.kind-needs-review': ['First look only: {kind}', 'Solo una primera idea: {kind}'],
+	'reason-short.velocity-missing': ['Missing: velocity of the rack', 'Falta: velocidad de la cremallera'],
+	'reason-short.torque-on-rack': [
+		'A torque gives no force on a rack',
+		'Un par no da fuerza en una cremallera'
+	],
+	'reason-short.angle-not-covered': [
+		'Pressure angle of {pressureAngle}° out of range',
+		'Ángulo de presión de {pressureAngle}° fuera de rango'
+	],
+	'reason-short.mate-helix-differs': [
+		'Gear and mate do not mesh: helix',
+		'El engrane y su conjugado no engranan: hélice'
+	],
+	'reason-short.kinds-do-not-mesh': ['These kinds do not mesh', 'Estos tipos no engranan'],
+	'reason-short.internal-too-small': [
+		'Internal gear smaller than its pinion',
+		'Engrane interior menor que su piñón'
+	],
+	'reason-short.centres-too-close': ['Centre distance too small', 'Distancia entre centros demasiado corta'],
+	'reason-short.contact-ratio-below-one': ['Contact ratio below 1', 'Relación de contacto menor que 1'],
+	'reason-short.undercut-too-deep': ['Undercut too deep', 'Socavado demasiado profundo'],
+	'reason-short.tooth-pointed': ['Pointed teeth', 'Dientes en punta'],
+	'reason-short.tip-worn-away': ['Tips worn away', 'Puntas gastadas']
+} as const satisfies Record<string, readonly [string, string]>;
