@@ -61,6 +61,15 @@ export function stagesIn({ dataDir, started }) {
 				return tallyOf(report, vitestTally, code);
 			}
 		},
+		mutation: {
+			title: 'Each constant and factor of the formulas changed: some test must fail',
+			async work(extra) {
+				const report = freshReport('mutation.json');
+				const args = [join(root, 'tests/mutation/run.mjs'), '--report', report, ...extra];
+				const { code } = await run(process.execPath, args, { ...common, env });
+				return tallyOf(report, (/** @type {Tally} */ tally) => tally, code);
+			}
+		},
 		e2e: {
 			title: 'Browser tests',
 			async work(extra) {

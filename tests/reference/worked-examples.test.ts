@@ -179,6 +179,28 @@ describe('Jindal, Machine Design', () => {
 	});
 });
 
+test('Jindal, Machine Design, Ex. 26-3, p. 699: helical pair of 24 and 72 teeth, normal module 5, 24 degrees', () => {
+	const base = spurCheck({
+		teeth: 24,
+		pitch: module(5),
+		face: { value: 50, unit: 'mm' },
+		allowable: { value: 600 / 3, unit: 'MPa' },
+		rpm: 720
+	});
+	const outcome = evaluate({
+		...base,
+		gear: { ...base.gear, kind: 'helical', plane: 'normal', helixAngle: 24 }
+	});
+	const line = (symbol: string) => outcome.working.find((one) => one.symbol === symbol)?.value ?? NaN;
+	expect(line('Nv')).toBeCloseTo(31.48, 2);
+	// The book interpolates linearly in N, this table in 1/N: 0.0001 apart.
+	expect(outcome.formFactor).toBeCloseTo(0.36244, 3);
+	// The book's velocity factor is 5.6 / (5.6 + √v) and its reserve 1.4 x 2: 22.936 kW.
+	const velocity = outcome.pitchLineVelocity ?? NaN;
+	const book = (line('WL') * velocity * (5.6 / (5.6 + Math.sqrt(velocity)))) / (1.4 * 2);
+	expect(Math.abs(book / 22_936 - 1)).toBeLessThan(0.0005);
+});
+
 describe('Bevan, The Theory of Machines, Ex. 10.1 to 10.3, p. 320', () => {
 	test('48 teeth of 3/4 in circular pitch', () => {
 		const outcome = ask({ teeth: 48, pitch: { system: 'circular', value: 0.75, unit: 'in' } });

@@ -37,19 +37,20 @@ export function evaluate(input: EvaluateInput): Outcome {
 
 /** Figures that left the range of numbers become null, a group of them as a whole. */
 function finiteOnly(figures: Figures): { figures: Figures; overflowed: boolean } {
-	let overflowed = false;
-	const kept = Object.entries(figures).map(([name, value]: [string, unknown]) => {
-		if (isFiniteThroughout(value)) return [name, value];
-		overflowed = true;
-		return [name, Array.isArray(value) ? [] : null];
-	});
-	return overflowed
-		? { figures: { ...(Object.fromEntries(kept) as Figures), limits: [], limitedBy: null }, overflowed }
-		: { figures, overflowed };
+	if (isFiniteThroughout(figures)) return { figures, overflowed: false };
+	const kept = Object.entries(figures).map(([name, value]: [string, unknown]) => [
+		name,
+		isFiniteThroughout(value) ? value : null
+	]);
+	const finite = { ...(Object.fromEntries(kept) as Figures), limits: [], limitedBy: null };
+	return { figures: finite, overflowed: true };
 }
 
 function isFiniteThroughout(value: unknown): boolean {
 	if (typeof value === 'number') return Number.isFinite(value);
 	if (typeof value !== 'object' || value === null) return true;
-	return Object.values(value).every(isFiniteThroughout);
+	for (const name in value) {
+		if (!isFiniteThroughout(value[name as keyof typeof value])) return false;
+	}
+	return true;
 }

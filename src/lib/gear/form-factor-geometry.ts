@@ -46,7 +46,7 @@ export function lewisFormFactorByGeometry(
 	const few = fewTeethRefusal(shape.teeth);
 	if (few) return few;
 	return recorded(
-		remembered(keyOf(shape), () => weakestOfTooth(shape)),
+		remembered(shape, () => weakestOfTooth(shape)),
 		recorder
 	);
 }
@@ -62,30 +62,31 @@ export function rackFormFactor(
 ): GeometryFormFactor | Reason {
 	const shape = { teeth: Infinity, rack, profileShift: 0, tipWear };
 	return recorded(
-		remembered(keyOf(shape), () => weakestOfRack(rack, tipWear)),
+		remembered(shape, () => weakestOfRack(rack, tipWear)),
 		recorder
 	);
 }
 
+const source = SOURCES.generatedTooth;
+const READ = { expression: 'from the generated tooth', unit: 'modules', source };
+const THICKNESS = { ...READ, symbol: 'tc', name: 'thickness of the tooth at its weakest section' };
+const HEIGHT = { ...READ, symbol: 'hc', name: 'height of the load above its weakest section' };
+const FACTOR = {
+	symbol: 'Yg',
+	name: 'Lewis form factor by geometry, load at the tip',
+	expression: 'tc² / (6 · hc)',
+	unit: '1',
+	source
+};
+
 function recorded(section: WeakestSection | Reason, recorder: Recorder): GeometryFormFactor | Reason {
 	if ('code' in section) return section;
-	const line = { unit: 'modules', source: SOURCES.generatedTooth };
-	const read = (symbol: string, name: string, value: number) =>
-		recorder.step({ ...line, symbol, name, expression: 'from the generated tooth' }, {}, () => value);
-	const tc = read('tc', 'thickness of the tooth at its weakest section', section.thickness);
-	const hc = read('hc', 'height of the load above its weakest section', section.height);
-	const Y = recorder.step(
-		{
-			...line,
-			symbol: 'Yg',
-			name: 'Lewis form factor by geometry, load at the tip',
-			expression: 'tc² / (6 · hc)',
-			unit: '1'
-		},
-		{ tc, hc },
-		({ tc, hc }) => (tc * tc) / (6 * hc)
-	);
-	return { ...section, Y };
+	const { thickness, height, teeth, rack, profileShift } = section;
+	const terms = { tc: thickness, hc: height };
+	recorder.step(THICKNESS, terms, ({ tc }) => tc);
+	recorder.step(HEIGHT, terms, ({ hc }) => hc);
+	const Y = recorder.step(FACTOR, terms, ({ tc, hc }) => (tc * tc) / (6 * hc));
+	return { thickness, height, teeth, rack, profileShift, Y };
 }
 
 function weakestOfTooth(shape: ToothShape): WeakestSection | Reason {
@@ -154,21 +155,27 @@ function weakestOf(
 	return { thickness: 2 * x, height: vertex - y };
 }
 
-/** A check is answered again with every keystroke: the tooth rarely changes, so its section is kept. */
-const MOST_REMEMBERED = 256;
-const sections = new Map<string, WeakestSection | Reason>();
+/** A check is answered again with every keystroke, and its teeth rarely change: their sections are kept. */
+const MOST_REMEMBERED = 32;
+const sections: { shape: ToothShape; section: WeakestSection | Reason }[] = [];
 
-function remembered(key: string, work: () => WeakestSection | Reason): WeakestSection | Reason {
-	const known = sections.get(key);
-	if (known) return known;
+function remembered(shape: ToothShape, work: () => WeakestSection | Reason): WeakestSection | Reason {
+	const known = sections.find((kept) => sameShape(kept.shape, shape));
+	if (known) return known.section;
 	const section = work();
-	const [oldest] = sections.keys();
-	if (sections.size >= MOST_REMEMBERED && oldest !== undefined) sections.delete(oldest);
-	sections.set(key, section);
+	sections.unshift({ shape, section });
+	if (sections.length > MOST_REMEMBERED) sections.pop();
 	return section;
 }
 
-function keyOf({ teeth, rack, profileShift, tipWear }: ToothShape): string {
-	const { addendum, dedendum, tipRadius, pressureAngle } = rack;
-	return `${teeth} ${addendum} ${dedendum} ${tipRadius} ${pressureAngle} ${profileShift} ${tipWear}`;
+function sameShape(a: ToothShape, b: ToothShape): boolean {
+	return (
+		a.teeth === b.teeth &&
+		a.profileShift === b.profileShift &&
+		a.tipWear === b.tipWear &&
+		a.rack.pressureAngle === b.rack.pressureAngle &&
+		a.rack.addendum === b.rack.addendum &&
+		a.rack.dedendum === b.rack.dedendum &&
+		a.rack.tipRadius === b.rack.tipRadius
+	);
 }

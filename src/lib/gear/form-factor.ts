@@ -35,6 +35,9 @@ const line = {
 	unit: '1',
 	source: SOURCES.lewisTable
 };
+const ENTRY = { ...line, expression: 'table at N' };
+const RACK = { ...line, expression: 'table, rack' };
+const BETWEEN = { ...line, expression: 'Ya + (Yb - Ya) · (1 / Na - 1 / N) / (1 / Na - 1 / Nb)' };
 
 /** The Lewis method ends below ten teeth, by table and by geometry alike. */
 export function fewTeethRefusal(teeth: number): Reason | null {
@@ -65,15 +68,14 @@ export function lewisFormFactor(tooth: TableTooth, recorder: Recorder = unrecord
 	if (!column || !handbookHolds(tooth)) {
 		throw new RangeError('The handbook table does not hold this tooth: see handbookHolds.');
 	}
-	if (tooth.teeth === Infinity)
-		return recorder.step({ ...line, expression: 'table, rack' }, {}, () => column.rack);
+	if (tooth.teeth === Infinity) return recorder.step(RACK, {}, () => column.rack);
 
 	const { below, above } = neighbours(column, tooth.teeth);
 	if (below.N === tooth.teeth) {
-		return recorder.step({ ...line, expression: 'table at N' }, { N: below.N }, () => below.Y);
+		return recorder.step(ENTRY, { N: below.N }, () => below.Y);
 	}
 	return recorder.step(
-		{ ...line, expression: 'Ya + (Yb - Ya) · (1 / Na - 1 / N) / (1 / Na - 1 / Nb)' },
+		BETWEEN,
 		{ Ya: below.Y, Yb: above.Y, Na: below.N, Nb: above.N, N: tooth.teeth },
 		({ Ya, Yb, Na, Nb, N }) => Ya + ((Yb - Ya) * (1 / Na - 1 / N)) / (1 / Na - 1 / Nb)
 	);

@@ -8,6 +8,8 @@ import { SOURCES } from './sources';
 import { unrecorded, type Recorder } from './working';
 
 const line = { symbol: 'Wt', name: 'tangential force', unit: 'N', source: SOURCES.mechanics };
+const BY_TORQUE = { ...line, expression: '2000 · T / d' };
+const BY_POWER = { ...line, expression: 'P / V' };
 
 /**
  * Tangential force Wt in N; null where the load is unknown, or the velocity of a power or the diameter of a torque is.
@@ -29,15 +31,11 @@ export function tangentialForce(
 	if ('torque' in load) {
 		if (diameter === null) return null;
 		const torque = recorder.given({ symbol: 'T', name: 'torque on this gear', unit: 'N·m' }, load.torque);
-		return recorder.step(
-			{ ...line, expression: '2000 · T / d' },
-			{ T: torque, d: diameter },
-			({ T, d }) => (2000 * T) / d
-		);
+		return recorder.step(BY_TORQUE, { T: torque, d: diameter }, ({ T, d }) => (2000 * T) / d);
 	}
 	if (velocity === null) return null;
 	const power = recorder.given({ symbol: 'P', name: 'power through this gear', unit: 'W' }, load.power);
-	return recorder.step({ ...line, expression: 'P / V' }, { P: power, V: velocity }, ({ P, V }) => P / V);
+	return recorder.step(BY_POWER, { P: power, V: velocity }, ({ P, V }) => P / V);
 }
 
 /**

@@ -9,6 +9,10 @@ import { unrecorded, type Recorder } from './working';
 
 const source = SOURCES.geometry;
 
+const LINE = { symbol: 'm', name: 'module', unit: 'mm' };
+const BY_DIAMETRAL = { ...LINE, expression: '25.4 / Pd', source };
+const BY_CIRCULAR = { ...LINE, expression: 'p / π', source };
+
 /**
  * Module m in mm. m = 25.4 / Pd (Pd in teeth per inch) or m = p / π (p in mm).
  * Source: definitions; Mott, Machine Elements in Mechanical Design, 4th ed., p. 319.
@@ -16,22 +20,13 @@ const source = SOURCES.geometry;
  * @example moduleOf({ system: 'circular', value: 0.75, unit: 'in' }) // 6.06380
  */
 export function moduleOf(pitch: Pitch, recorder: Recorder = unrecorded): number {
-	const line = { symbol: 'm', name: 'module', unit: 'mm' };
 	switch (pitch.system) {
 		case 'module':
-			return recorder.given(line, { value: pitch.value, unit: 'mm' });
+			return recorder.given(LINE, { value: pitch.value, unit: 'mm' });
 		case 'diametral':
-			return recorder.step(
-				{ ...line, expression: '25.4 / Pd', source },
-				{ Pd: pitch.value },
-				({ Pd }) => 25.4 / Pd
-			);
+			return recorder.step(BY_DIAMETRAL, { Pd: pitch.value }, ({ Pd }) => 25.4 / Pd);
 		case 'circular':
-			return recorder.step(
-				{ ...line, expression: 'p / π', source },
-				{ p: toSI(pitch) },
-				({ p }) => p / Math.PI
-			);
+			return recorder.step(BY_CIRCULAR, { p: toSI(pitch) }, ({ p }) => p / Math.PI);
 	}
 }
 

@@ -60,17 +60,17 @@ export function formFactorOf(
 		formFactorGeometry: geometry,
 		stressConcentration: section && stressConcentration(section, member.normalAngle, recorder)
 	};
-	const taken = takenSource(rule, handbook, geometry);
+	const taken = takenHead(rule, handbook, geometry);
 	if (!taken) {
 		const refusal = 'code' in byGeometry ? byGeometry : null;
 		return { figures: { ...NO_FORM_FACTOR, ...figures }, refusal };
 	}
-	const formFactor = recorder.step(
-		{ ...DECIDES, expression: taken.expression },
-		{ Yh: handbook ?? 0, Yg: geometry ?? 0 },
-		({ Yh, Yg }) => (taken.source === 'handbook' ? Yh : Yg)
+	const terms = { Yh: handbook ?? Infinity, Yg: geometry ?? Infinity };
+	const formFactor = recorder.step(taken, terms, ({ Yh, Yg }) =>
+		taken === BY_HANDBOOK ? Yh : taken === BY_GEOMETRY ? Yg : Math.min(Yh, Yg)
 	);
-	return { figures: { ...figures, formFactor, formFactorSource: taken.source }, refusal: null };
+	const formFactorSource = formFactor === handbook ? 'handbook' : 'geometry';
+	return { figures: { ...figures, formFactor, formFactorSource }, refusal: null };
 }
 
 const NO_FORM_FACTOR: FormFactorFigures = {
@@ -88,23 +88,19 @@ const DECIDES = {
 	source: SOURCES.plantRule
 };
 
-interface Taken {
-	source: 'handbook' | 'geometry';
-	expression: string;
-}
+const BY_HANDBOOK = { ...DECIDES, expression: 'Yh' };
+const BY_GEOMETRY = { ...DECIDES, expression: 'Yg' };
+const THE_LOWER = { ...DECIDES, expression: 'min(Yh, Yg)' };
 
-function takenSource(
+function takenHead(
 	rule: Rules['formFactor'],
 	handbook: number | null,
 	geometry: number | null
-): Taken | null {
-	if (rule === 'handbook' && handbook !== null) return { source: 'handbook', expression: 'Yh' };
+): typeof BY_HANDBOOK | null {
+	if (rule === 'handbook' && handbook !== null) return BY_HANDBOOK;
 	// A rule that asks for the lower of both cannot be met by the table alone.
 	if (geometry === null) return null;
-	if (rule === 'lower-of-both' && handbook !== null) {
-		return { source: handbook <= geometry ? 'handbook' : 'geometry', expression: 'min(Yh, Yg)' };
-	}
-	return { source: 'geometry', expression: 'Yg' };
+	return rule === 'lower-of-both' && handbook !== null ? THE_LOWER : BY_GEOMETRY;
 }
 
 export interface BendingAnswer {
