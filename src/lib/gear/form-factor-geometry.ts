@@ -68,9 +68,13 @@ export function rackFormFactor(
 }
 
 const source = SOURCES.generatedTooth;
-const READ = { expression: 'from the generated tooth', unit: 'modules', source };
-const THICKNESS = { ...READ, symbol: 'tc', name: 'thickness of the tooth at its weakest section' };
-const HEIGHT = { ...READ, symbol: 'hc', name: 'height of the load above its weakest section' };
+const READ = { expression: 'from the generated tooth', unit: '1', source };
+const THICKNESS = {
+	...READ,
+	symbol: 'tc',
+	name: 'thickness of the tooth at its weakest section, in modules'
+};
+const HEIGHT = { ...READ, symbol: 'hc', name: 'height of the load above its weakest section, in modules' };
 const FACTOR = {
 	symbol: 'Yg',
 	name: 'Lewis form factor by geometry, load at the tip',

@@ -52,14 +52,14 @@ function sameValue(a: Remedy['value'], b: Remedy['value']): boolean {
 	return a.value === b.value;
 }
 
-type Direction = 'most' | 'least' | 'with' | 'in';
+type Direction = 'most' | 'least' | 'slower' | 'faster' | 'with' | 'in';
 
 function directionOf({ change, value }: Remedy, outcome: Outcome): Direction {
 	if (change === 'finish') return 'with';
 	if (change === 'material') return 'in';
 	if (change === 'power') return 'most';
 	if (change === 'faceWidth' || typeof value === 'string') return 'least';
-	return speedNow(value, outcome) > value.value ? 'most' : 'least';
+	return speedNow(value, outcome) > value.value ? 'slower' : 'faster';
 }
 
 /** Present speed in the unit of the remedy. */

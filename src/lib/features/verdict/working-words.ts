@@ -36,7 +36,8 @@ export function workingRows(lines: readonly WorkingLine[], words: Words): Workin
 		symbol,
 		name: nameWords(name, of, words),
 		expression: translated(`expression.${expression}`, expression, words),
-		numbers: numbersWords(numbers, words),
+		// A figure that is read, not computed, has no numbers to put in.
+		numbers: numbers === expression ? '' : numbersWords(numbers, words),
 		value: shown(value, words),
 		unit: unit === '1' ? '' : unit,
 		inch: inchWords(value, unit, words),

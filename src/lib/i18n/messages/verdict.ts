@@ -36,6 +36,14 @@ export const verdict = {
 	'verdict.limit.wear': ['Wear, the pair', 'Desgaste, el par'],
 	'remedy.carries.most': ['It would pass at {what} or less.', 'Pasaría con {what} o menos.'],
 	'remedy.carries.least': ['It would pass at {what} or more.', 'Pasaría con {what} o más.'],
+	'remedy.carries.slower': [
+		'It would pass at {what} or less, with the same torque.',
+		'Pasaría a {what} o menos, con el mismo par.'
+	],
+	'remedy.carries.faster': [
+		'It would pass at {what} or more, with the same power.',
+		'Pasaría a {what} o más, con la misma potencia.'
+	],
 	'remedy.carries.with': ['It would pass with teeth {what}.', 'Pasaría con dientes {what}.'],
 	'remedy.carries.in': ['It would pass in {what}.', 'Pasaría en {what}.'],
 	'remedy.review.most': [
@@ -46,6 +54,14 @@ export const verdict = {
 		'At {what} or more it would still need review.',
 		'Con {what} o más aún requeriría revisión.'
 	],
+	'remedy.review.slower': [
+		'At {what} or less, with the same torque, it would still need review.',
+		'A {what} o menos, con el mismo par, aún requeriría revisión.'
+	],
+	'remedy.review.faster': [
+		'At {what} or more, with the same power, it would still need review.',
+		'A {what} o más, con la misma potencia, aún requeriría revisión.'
+	],
 	'remedy.review.with': [
 		'With teeth {what} it would still need review.',
 		'Con dientes {what} aún requeriría revisión.'
@@ -55,7 +71,7 @@ export const verdict = {
 		'Margin in bending {margin}, low end {low}.',
 		'Margen a flexión {margin}, extremo bajo {low}.'
 	],
-	'remedy.review-from': ['From there to {what} it needs review.', 'De ahí hasta {what} requiere revisión.'],
+	'remedy.review-from': ['Between that and {what} it needs review.', 'Entre eso y {what} requiere revisión.'],
 	'remedy.face': ['a face of {width}', 'una cara de {width}'],
 	'remedy.change': ['Change: needs review', 'Cambio: requiere revisión'],
 	'remedy.like-for-like': ['As the original was', 'Como era el original'],

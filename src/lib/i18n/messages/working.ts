@@ -107,13 +107,13 @@ export const working = {
 		'Lewis form factor that counts, by the rule of the plant',
 		'factor de forma de Lewis que cuenta, por la regla de la planta'
 	],
-	'working.thickness of the tooth at its weakest section': [
-		'thickness of the tooth at its weakest section',
-		'espesor del diente en su sección más débil'
+	'working.thickness of the tooth at its weakest section, in modules': [
+		'thickness of the tooth at its weakest section, in modules',
+		'espesor del diente en su sección más débil, en módulos'
 	],
-	'working.height of the load above its weakest section': [
-		'height of the load above its weakest section',
-		'altura de la carga sobre su sección más débil'
+	'working.height of the load above its weakest section, in modules': [
+		'height of the load above its weakest section, in modules',
+		'altura de la carga sobre su sección más débil, en módulos'
 	],
 	'working.what the bad end leaves of the margin': [
 		'what the bad end leaves of the margin',
