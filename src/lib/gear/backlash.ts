@@ -42,7 +42,7 @@ export function normalBacklash(question: BacklashQuestion, recorder: Recorder): 
 			s1: at(pinion, radius, 1),
 			s2: at(wheel, (radius * wheel.teeth) / pinion.teeth, sign)
 		},
-		({ pw, s1, s2 }) => pw - s1 - s2
+		({ pw, s1, s2 }) => withoutNoise(pw - s1 - s2)
 	);
 	const baseHelix = Math.asin(Math.sin(pinion.helixAngle) * Math.cos(pinion.normalAngle));
 	return recorder.step(
@@ -56,6 +56,11 @@ export function normalBacklash(question: BacklashQuestion, recorder: Recorder): 
 		{ jt: transverse, αw: (operatingAngle * 180) / Math.PI, βb: (baseHelix * 180) / Math.PI },
 		({ jt }) => jt * Math.cos(operatingAngle) * Math.cos(baseHelix)
 	);
+}
+
+/** A millionth of a millimetre is arithmetic, not backlash. */
+function withoutNoise(backlash: number): number {
+	return Math.abs(backlash) < 1e-6 ? 0 : backlash;
 }
 
 /** Transverse arc thickness on the reference circle in mm: measured, or nominal with its shift. */

@@ -100,7 +100,7 @@ export function lewisBeamStrength(
 
 /**
  * Tangential force Wp in N that the drive may put on the teeth at the plant's margin: velocity factor Kv, service
- * factor Ko and the needed margin taken off. Wp = WL / (Mn Ko Kv), WL the dynamic force of the answer that decides.
+ * factor Ko and the needed margin taken off. Wp = Wb / (Mn Ko Kv), Wb the dynamic force that the answer that decides bears.
  * Source: Wentzell, Machine Design, Ex. 12.5, p. 263.
  * @example permittedForce(16110, { needed: 2, serviceFactor: 1.5, velocityFactor: 1 }) // 5370
  */
@@ -117,12 +117,12 @@ export function permittedForce(
 		{
 			symbol: 'Wp',
 			name: "tangential force at the plant's margin",
-			expression: 'WL / (Mn · Ko · Kv)',
+			expression: 'Wb / (Mn · Ko · Kv)',
 			unit: 'N',
 			source
 		},
-		{ WL: strength, Mn: needed, Ko: serviceFactor, Kv: velocityFactor },
-		({ WL, Mn, Ko, Kv }) => WL / (Mn * Ko * Kv)
+		{ Wb: strength, Mn: needed, Ko: serviceFactor, Kv: velocityFactor },
+		({ Wb, Mn, Ko, Kv }) => Wb / (Mn * Ko * Kv)
 	);
 }
 

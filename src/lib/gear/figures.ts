@@ -15,7 +15,7 @@ import { SOURCES } from './sources';
 import { formFactorOf, memberBending } from './strength';
 import { isPower, lowEnd, marginUncertainty, type MarginUncertainty } from './uncertainty';
 import { velocityFactorShare, type VelocityLaw } from './velocity';
-import type { Recorder } from './working';
+import type { LineHead, Recorder } from './working';
 
 /** The part of the outcome that is worked out here; names and units as there. */
 export type Figures = Omit<Outcome, 'core' | 'original' | 'verdict' | 'reasons' | 'remedies' | 'working'>;
@@ -155,6 +155,18 @@ function marginsOf(
 	};
 }
 
+const DECIDES = {
+	symbol: 'Wb',
+	name: 'dynamic force that the answer that decides bears',
+	unit: 'N',
+	source: SOURCES.definition
+};
+const WEAKEST: Record<LimitName, LineHead> = {
+	'gear-bending': { ...DECIDES, expression: 'WL' },
+	'mate-bending': { ...DECIDES, expression: 'WL' },
+	wear: { ...DECIDES, expression: 'Ww' }
+};
+
 /** Where the gear's own teeth cannot be judged, nothing can be stated of the pair. */
 function permittedOf(
 	strengths: Strength[],
@@ -168,7 +180,12 @@ function permittedOf(
 		return { permittedPower: null, permittedTorque: null };
 	}
 	const factors = { needed: weakest.needed, serviceFactor, velocityFactor };
-	const force = permittedForce(weakest.force, factors, recorder);
+	const borne = (weakest.answer === 'mate-bending' ? recorder.mate() : recorder).step(
+		WEAKEST[weakest.answer],
+		{ WL: weakest.force, Ww: weakest.force },
+		({ WL }) => WL
+	);
+	const force = permittedForce(borne, factors, recorder);
 	return {
 		permittedPower: permittedPowerOf(force, velocity, recorder),
 		permittedTorque: diameter === null ? null : permittedTorqueOf(force, diameter, recorder)

@@ -128,7 +128,9 @@ function operating({ gear, mate, centreDistance }: MeshQuestion, recorder: Recor
 			{ C0: standardCentre, αt: degrees(angle), C: centreDistance },
 			() => degrees(Math.acos(cosine))
 		);
-		return { ...common, centre: centreDistance, operatingAngle: Math.acos(cosine) };
+		// At the standard distance the angle is the standard one, to the last digit.
+		const operatingAngle = centreDistance === standardCentre ? angle : Math.acos(cosine);
+		return { ...common, centre: centreDistance, operatingAngle };
 	}
 	const shifts = two.profileShift + sign * one.profileShift;
 	const inv = involute(angle) + (2 * shifts * Math.tan(gear.normalAngle)) / (two.teeth + sign * one.teeth);

@@ -83,7 +83,17 @@ export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 		},
 		recorder
 	);
-	const strength = Math.min(byContact, wearLoad);
+	const strength = recorder.step(
+		{
+			symbol: 'Ww',
+			name: 'dynamic force that the flanks bear, the lower of both',
+			expression: 'min(Wh, Fw)',
+			unit: 'N',
+			source: SOURCES.definition
+		},
+		{ Wh: byContact, Fw: wearLoad },
+		({ Wh, Fw }) => Math.min(Wh, Fw)
+	);
 	if (dynamicForce === null) return { strength, figures: null, refusal: null };
 
 	const margin = (symbol: string, name: string, expression: string, bears: number) =>

@@ -3,6 +3,14 @@
  * Titles of books stay as they are printed.
  */
 export const working = {
+	'working.dynamic force that the answer that decides bears': [
+		'dynamic force that the answer that decides bears',
+		'fuerza dinámica que soporta la respuesta que decide'
+	],
+	'working.dynamic force that the flanks bear, the lower of both': [
+		'dynamic force that the flanks bear, the lower of both',
+		'fuerza dinámica que los flancos soportan, la menor de ambas'
+	],
 	'working-of.mate': ['mate: {name}', 'conjugado: {name}'],
 	'working.module': ['module', 'módulo'],
 	'working.pitch diameter': ['pitch diameter', 'diámetro de paso'],
