@@ -51,7 +51,7 @@ export default defineConfig(({ mode }) => ({
 	// The database's own files are none of the development server's business.
 	server: { watch: { ignored: ['**/.data*/**'] } },
 	test: {
-		include: ['tests/{reference,unit,architecture,server,security,sync}/**/*.test.ts'],
+		include: ['tests/{reference,unit,identify,architecture,server,security,sync}/**/*.test.ts'],
 		environment: 'node',
 		// The server's tests share one PostgreSQL; each file makes plants of its own, so files may run side by side.
 		testTimeout: 20_000,

@@ -5,10 +5,11 @@ import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { readSettings } from '../../scripts/lib/settings.mjs';
 import { evaluateFigures } from './core/evaluate.mjs';
+import { identifyFigures } from './core/identify.mjs';
 import { table, told } from './figure.mjs';
 
 /** By the first part of the names that they measure. */
-const BENCHES = { evaluate: evaluateFigures };
+const BENCHES = { evaluate: evaluateFigures, identify: identifyFigures };
 
 const USAGE = `Usage: npm run bench [-- --only NAME] [--quick]\n\nNames begin with: ${Object.keys(BENCHES).join(', ')}\n`;
 

@@ -15,6 +15,7 @@ import {
 } from '$lib/gear/measure/span';
 import { memberOf, tipDiameter } from '$lib/gear/member';
 import { pitchHint } from '$lib/gear/pitch-hint';
+import { nominalThickness } from '$lib/gear/thickness';
 import { Working } from '$lib/gear/working';
 import { diametral, module } from './spur-check';
 
@@ -145,19 +146,60 @@ describe('over pins of 1.728 / P, 1 diametral pitch', () => {
 		expect(thicknessFromPins(over, gear, usualPin(1))).toBeCloseTo(Math.PI / 2, 9);
 	});
 
-	test('an odd count is measured across a chord', () => {
-		const gear = { teeth: 25, module: 1, pressureAngle: radians(20), thickness: Math.PI / 2 };
-		const across = overPins(gear, 1.728) - 1.728;
-		// The same gear's pin circle, found from the even neighbours on either side.
-		const even = (teeth: number) => overPins({ ...gear, teeth }, 1.728) - 1.728;
-		expect(across).toBeCloseTo(((even(24) + even(26)) / 2) * Math.cos(radians(90 / 25)), 3);
+	// No table was at hand for odd counts and shifted teeth: the pin is laid against a flank drawn point by point.
+	test.each([
+		[24, 20, 0, 1.728],
+		[25, 20, 0, 1.728],
+		[25, 20, 0.4, 1.92],
+		[17, 14.5, 0.2, 1.728],
+		[41, 25, -0.3, 1.68]
+	])(
+		'%d teeth at %d degrees, shift %d, pins of %d: as a pin that touches the flank',
+		(teeth, angle, shift, pin) => {
+			const alpha = radians(angle);
+			const thickness = nominalThickness(1, shift, alpha);
+			const over = overPins({ teeth, module: 1, pressureAngle: alpha, thickness }, pin);
+			const opposite = teeth % 2 === 0 ? 1 : Math.cos(radians(90 / teeth));
+			const centre = (over - pin) / (2 * opposite);
+			// The middle of the space is the y axis; the involute unwinds from the base circle, away from it.
+			const base = (teeth / 2) * Math.cos(alpha);
+			const spaceAtBase = Math.PI / teeth - thickness / teeth - (Math.tan(alpha) - alpha);
+			const away = Array.from({ length: 200_001 }, (_, i) => (i / 200_000) * 1.2).map((roll) => {
+				const radius = base * Math.hypot(1, roll);
+				const turned = spaceAtBase + roll - Math.atan(roll);
+				return Math.hypot(radius * Math.sin(turned), radius * Math.cos(turned) - centre);
+			});
+			expect(Math.min(...chunked(away))).toBeCloseTo(pin / 2, 7);
+		}
+	);
+
+	test('the working of a measurement over pins can be followed', () => {
+		const working = new Working();
+		const gear = { teeth: 30, module: 1, pressureAngle: radians(20), thickness: Math.PI / 2 };
+		const over = overPins(gear, 1.728, working);
+		const [line] = working.lines;
+		expect(line).toMatchObject({ symbol: 'M', value: over });
+		const [base = NaN, angle = NaN, factor = NaN, pin = NaN] = (line?.numbers.match(/[\d.]+/g) ?? []).map(
+			Number
+		);
+		expect((base / Math.cos(radians(angle))) * factor + pin).toBeCloseTo(32.4102, 4);
 	});
 
-	test('pins inside the base circle have no thickness', () => {
+	test('pins that would sink to the base circle lie on it, and none inside it has a thickness', () => {
 		const gear = { teeth: 20, module: 1, pressureAngle: radians(20) };
+		expect(overPins({ ...gear, thickness: Math.PI / 2 }, 1)).toBeCloseTo(20 * Math.cos(radians(20)) + 1, 12);
 		expect(thicknessFromPins(15, gear, 1.728)).toBeNull();
+		// Base diameter 18.794, so 18.4 under the pins is just inside it.
+		expect(thicknessFromPins(18.4 + 1.728, gear, 1.728)).toBeNull();
 	});
 });
+
+/** Least of each thousand: more arguments than that are too many for one call. */
+function chunked(values: number[]): number[] {
+	return Array.from({ length: Math.ceil(values.length / 1000) }, (_, i) =>
+		Math.min(...values.slice(i * 1000, (i + 1) * 1000))
+	);
+}
 
 describe('chordal thickness and addendum, 1 diametral pitch', () => {
 	// Machinery's Handbook, gear-tooth calliper table (from memory; older tables differ by 1 in the fourth place).
@@ -195,7 +237,31 @@ describe('chordal thickness and addendum, 1 diametral pitch', () => {
 		expect(height).toBeCloseTo(0.74758, 5);
 	});
 
-	test('the constant chord does touch both flanks: a wide gear’s chordal thickness tends to the arc', () => {
+	test.each([0, 0.3, -0.2])(
+		'the constant chord at a shift of %d is where a rack’s flank touches',
+		(shift) => {
+			const [alpha, teeth] = [radians(20), 30];
+			const { chord, height } = constantChord({
+				module: 1,
+				profileShift: shift,
+				pressureAngle: alpha,
+				addendum: 1
+			});
+			// A rack whose space is centred on the tooth, turned with it from its middle until its flank touches in the
+			// normal through the pitch point: half of the arc s cos² α away, and half of it s sin α cos α towards the tip.
+			const half = nominalThickness(1, shift, alpha) / 2;
+			expect(chord / 2).toBeCloseTo(half * Math.cos(alpha) ** 2, 12);
+			expect(1 + shift - height).toBeCloseTo(half * Math.sin(alpha) * Math.cos(alpha), 12);
+			// That point lies on the involute: at its radius the tooth is as wide as the chord.
+			const y = teeth / 2 + 1 + shift - height;
+			const radius = Math.hypot(chord / 2, y);
+			const at = Math.acos(((teeth / 2) * Math.cos(alpha)) / radius);
+			const inv = (angle: number) => Math.tan(angle) - angle;
+			expect(Math.atan2(chord / 2, y)).toBeCloseTo(half / (teeth / 2) + inv(alpha) - inv(at), 6);
+		}
+	);
+
+	test('a wide gear’s chordal thickness tends to the arc', () => {
 		const gear = { teeth: 1e6, module: 1, profileShift: 0.2, pressureAngle: radians(20), addendum: 1 };
 		expect(chordal(gear).thickness).toBeCloseTo(Math.PI / 2 + 0.4 * Math.tan(radians(20)), 9);
 		expect(chordal(gear).addendum).toBeCloseTo(1.2, 5);
@@ -217,6 +283,26 @@ describe('outside diameter and pitch', () => {
 		});
 		expect((member.pitchDiameter ?? NaN) / 25.4).toBeCloseTo(pitchDiameter, 4);
 		expect((tipDiameter(member) ?? NaN) / 25.4).toBeCloseTo(outside, 4);
+	});
+
+	// The same page: circular pitch, addendum, dedendum, clearance, root diameters, whole and working depth, inches.
+	test('12 DP, 11 and 18 teeth: the tooth of Mott, p. 319', () => {
+		const inches = (modules: number) => modules / 12;
+		const { rack } = memberOf({
+			kind: 'spur',
+			teeth: 11,
+			pitch: diametral(12),
+			pressureAngle: 20,
+			form: 'full-depth'
+		});
+		expect(inches(rack.addendum)).toBeCloseTo(0.0833, 4);
+		expect(inches(rack.dedendum)).toBeCloseTo(0.1042, 4);
+		expect(inches(rack.dedendum - rack.addendum)).toBeCloseTo(0.0208, 4);
+		expect(inches(rack.addendum + rack.dedendum)).toBeCloseTo(0.1875, 4);
+		expect(inches(2 * rack.addendum)).toBeCloseTo(0.1667, 4);
+		expect(inches(11 - 2 * rack.dedendum)).toBeCloseTo(0.7083, 4);
+		expect(inches(18 - 2 * rack.dedendum)).toBeCloseTo(1.2917, 4);
+		expect(inches(basePitch(1, 0))).toBeCloseTo(0.2618, 4);
 	});
 
 	test('1.6667 in outside with 18 teeth is 12 DP (Mott, p. 319)', () => {

@@ -73,6 +73,16 @@ describe('path and ratio of contact', () => {
 		expect(mesh(gear(28, { angle }), gear(45, { angle })).contactRatio).toBeCloseTo(ratio, 4);
 	});
 
+	test('no approach is longer than r sin α: Bevan, Ex. 10.4, p. 334', () => {
+		// 12 and 60 teeth interfere, so contact begins where the line of action leaves the pinion's base circle.
+		const [pinion, wheel] = [gear(12, { angle: 14.5 }), gear(60, { angle: 14.5 })];
+		const angle = (14.5 * Math.PI) / 180;
+		const recess = Math.sqrt(7 ** 2 - (6 * Math.cos(angle)) ** 2) - 6 * Math.sin(angle);
+		expect(pathOf(pinion, wheel, 14.5)).toBeCloseTo(6 * Math.sin(angle) + recess, 12);
+		// Tip to tip would be 1.88.
+		expect(mesh(pinion, wheel).contactRatio).toBeCloseTo(1.2842, 4);
+	});
+
 	test('a rack has the ratio that a very large wheel tends to', () => {
 		const wheel = mesh(gear(24), gear(5000)).contactRatio;
 		expect(mesh(gear(24), rack()).contactRatio).toBeCloseTo(wheel, 2);
@@ -181,7 +191,7 @@ describe('backlash', () => {
 			60.1
 		);
 		const transverse = (normalBacklash ?? NaN) / Math.cos((operatingPressureAngle * Math.PI) / 180);
-		expect(transverse).toBeCloseTo(0.07337, 4);
+		expect(transverse).toBeCloseTo(0.07337, 5);
 	});
 
 	test('teeth thinner by s have s cos α more of it, at the standard distance', () => {
@@ -201,8 +211,10 @@ describe('backlash', () => {
 	// AGMA 2002-B88 (Mott, Table 8-5; from memory), inches: its closed form is 1.5 times that of ISO/TR 10064-2.
 	// prettier-ignore
 	test.each([
-		[18, 2, 0.005], [12, 4, 0.007], [8, 2, 0.007], [8, 8, 0.01], [5, 4, 0.01], [5, 16, 0.016], [3, 8, 0.016],
-		[3, 32, 0.028], [2, 16, 0.025], [1.25, 32, 0.042]
+		[18, 2, 0.005], [18, 4, 0.006], [12, 2, 0.006], [12, 4, 0.007], [12, 8, 0.009], [8, 2, 0.007], [8, 4, 0.008],
+		[8, 8, 0.01], [8, 16, 0.014], [5, 4, 0.01], [5, 8, 0.012], [5, 16, 0.016], [3, 4, 0.014], [3, 8, 0.016],
+		[3, 16, 0.02], [3, 32, 0.028], [2, 8, 0.021], [2, 16, 0.025], [2, 32, 0.033], [1.25, 16, 0.034],
+		[1.25, 32, 0.042]
 	])('least for %d DP at %d in: %d in by AGMA, two thirds of it by ISO/TR 10064-2', (pitch, centre, published) => {
 		const { least } = recommendedBacklash(25.4 / pitch, centre * 25.4);
 		expect(Math.abs((least * 1.5) / 25.4 - published)).toBeLessThanOrEqual(0.00045);
@@ -216,14 +228,17 @@ describe('backlash', () => {
 		expect(recommendedBacklash(module, centre).least).toBeCloseTo(published, 3);
 	});
 
-	// Machinery's Handbook, recommended backlash of coarse pitch (from memory), inches.
+	// Machinery's Handbook, recommended backlash of coarse pitch (from memory), inches: the end of each range.
+	// prettier-ignore
 	test.each([
-		[12, 4, 0.015],
-		[8, 7, 0.02],
-		[4, 15, 0.03],
-		[3, 25, 0.04],
-		[1, 35, 0.06],
-		[2, 90, 0.08]
+		[10, 5, 0.015], [19.9, 4, 0.015],
+		[6, 7, 0.02], [9.9, 10, 0.02], [12, 7, 0.02],
+		[4, 15, 0.03], [8, 15, 0.025], [12, 20, 0.02],
+		[3, 25, 0.04], [3.5, 25, 0.03], [8, 30, 0.03],
+		[1, 35, 0.06], [2, 35, 0.045], [5.9, 35, 0.04], [6, 35, 0.035],
+		[0.5, 45, 0.07], [3.4, 45, 0.055], [4, 45, 0.05], [8, 45, 0.04],
+		[1.9, 60, 0.08], [3, 60, 0.065], [4, 80, 0.06],
+		[1, 90, 0.095], [2, 100, 0.08]
 	])('most for %d DP at %d in: %d in', (pitch, centre, published) => {
 		expect((recommendedBacklash(25.4 / pitch, centre * 25.4).most ?? NaN) / 25.4).toBeCloseTo(published, 9);
 	});
@@ -231,6 +246,7 @@ describe('backlash', () => {
 	test('where the table has no entry there is no upper end', () => {
 		expect(recommendedBacklash(25.4 / 4, 4 * 25.4).most).toBeNull();
 		expect(recommendedBacklash(0.5, 100).most).toBeNull();
+		expect(recommendedBacklash(25.4, 101 * 25.4).most).toBeNull();
 	});
 });
 

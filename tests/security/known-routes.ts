@@ -63,6 +63,7 @@ export const KNOWN_ROUTES: Record<string, KnownRoute> = {
 		}
 	},
 	'POST /api/v1/evaluate': { who: 'member', status: [422], asked: () => ({ init: jsonInit({}) }) },
+	'POST /api/v1/identify': { who: 'member', status: [422], asked: () => ({ init: jsonInit({}) }) },
 
 	'GET /api/v1/recompute': { who: OFFICE, status: [200] },
 

@@ -5,6 +5,8 @@ import { spawnSync } from 'node:child_process';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, test } from 'vitest';
 import { evaluate } from '$lib/gear/evaluate';
+import type { IdentifyInput } from '$lib/gear/identify/contract';
+import { identify } from '$lib/gear/identify/identify';
 import { runCore } from '../../scripts/lib/core-cli';
 import { spurCheck } from '../reference/spur-check';
 
@@ -31,6 +33,37 @@ const badTeeth = {
 		issues: [{ path: 'gear.teeth', message: 'Teeth must be a whole number of at least 1.' }]
 	}
 };
+
+describe('identify', () => {
+	const readings = {
+		teeth: 25,
+		outsideDiameter: { value: 5.389, unit: 'in', uncertainty: 0.001, taken: 'over-tips' },
+		prior: 'inch'
+	};
+	const answer = plain(identify(readings as IdentifyInput));
+
+	test('one set of readings, and several with an invalid one in place', () => {
+		const one = core(['identify'], JSON.stringify(readings));
+		expect(one).toMatchObject({ status: 0, stderr: '' });
+		expect(JSON.parse(one.stdout)).toEqual(answer);
+		const many = core(['identify'], JSON.stringify([readings, { ...readings, teeth: 'many' }]));
+		expect(many.status).toBe(0);
+		const [first, second] = JSON.parse(many.stdout) as unknown[];
+		expect(first).toEqual(answer);
+		expect(second).toMatchObject({ error: { code: 'invalid-input', issues: [{ path: 'teeth' }] } });
+	});
+
+	test('bad readings exit 2 and name the field', () => {
+		const run = core(
+			['identify'],
+			JSON.stringify({ ...readings, outsideDiameter: { value: 0, unit: 'in' } })
+		);
+		expect(run.status).toBe(2);
+		expect(JSON.parse(run.stdout)).toMatchObject({
+			error: { issues: [{ path: 'outsideDiameter.value' }] }
+		});
+	});
+});
 
 describe('evaluate', () => {
 	test('one check, through npm: the outcome that the core itself gives, and nothing else', () => {
@@ -103,11 +136,4 @@ describe('commands', () => {
 			expect(run).toEqual({ exitCode: 2, stdout: '', stderr: expect.stringContaining('Usage:') as string });
 		}
 	);
-
-	test('identify is said to be missing, exit 2', () => {
-		const run = core(['identify'], '{}');
-		expect(run.status).toBe(2);
-		expect(run.stderr).toContain('identify is not in this version');
-		expect(JSON.parse(run.stdout)).toMatchObject({ error: { code: 'not-available' } });
-	});
 });

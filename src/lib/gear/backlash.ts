@@ -4,6 +4,7 @@ import { involute } from './involute';
 import type { Member } from './member';
 import { SOURCES } from './sources';
 import { machinerysHandbookRange } from './tables/machinerys-handbook-backlash';
+import { arcThickness } from './thickness';
 import type { Recorder } from './working';
 
 export interface BacklashQuestion extends MeshGeometry {
@@ -26,9 +27,10 @@ export function normalBacklash(question: BacklashQuestion, recorder: Recorder): 
 	const sign = wheel.kind === 'internal' ? -1 : 1;
 	const radius = (centre * pinion.teeth) / (wheel.teeth + sign * pinion.teeth);
 	const pitch = (2 * Math.PI * radius) / pinion.teeth;
-	const grown = involute(pinion.transverseAngle) - involute(operatingAngle);
-	const at = (member: Member, rolling: number, sense: number) =>
-		2 * rolling * (thicknessOf(member) / (member.pitchDiameter ?? NaN) + sense * grown);
+	const at = (member: Member, rolling: number, sense: number) => {
+		const grown = involute(member.transverseAngle) - involute(operatingAngle);
+		return 2 * rolling * (arcThickness(member) / (member.pitchDiameter ?? NaN) + sense * grown);
+	};
 	const transverse = recorder.step(
 		{
 			symbol: 'jt',
@@ -61,13 +63,6 @@ export function normalBacklash(question: BacklashQuestion, recorder: Recorder): 
 /** A millionth of a millimetre is arithmetic, not backlash. */
 function withoutNoise(backlash: number): number {
 	return Math.abs(backlash) < 1e-6 ? 0 : backlash;
-}
-
-/** Transverse arc thickness on the reference circle in mm: measured, or nominal with its shift. */
-function thicknessOf(member: Member): number {
-	const { toothThickness, normalModule, normalAngle, profileShift, helixAngle, kind } = member;
-	const shifted = 2 * profileShift * Math.tan(normalAngle) * (kind === 'internal' ? -1 : 1);
-	return (toothThickness ?? (Math.PI / 2 + shifted) * normalModule) / Math.cos(helixAngle);
 }
 
 /**

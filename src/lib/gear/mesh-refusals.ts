@@ -51,6 +51,11 @@ export const CENTRES_TOO_CLOSE: Reason = {
 	text: 'At this centre distance the two cannot stand: their base circles overlap. Check the centre distance and both counts.'
 };
 
+export const SHIFTS_DO_NOT_MESH: Reason = {
+	code: 'shifts-do-not-mesh',
+	text: 'With these profile shifts there is no centre distance at which the two run. Check both shifts and counts, or measure the centre distance.'
+};
+
 export function discontinuousRefusal(contactRatio: number): Reason | null {
 	if (contactRatio >= 1) return null;
 	return {

@@ -10,7 +10,9 @@ const PREFERRED_CONTACT = 1.4;
 type Mesh = NonNullable<Outcome['mesh']>;
 
 export function meshWarnings(mesh: Mesh, geometry: MeshGeometry): Reason[] {
-	return [contact(mesh), rootWarning(mesh), backlash(mesh, geometry)].filter((reason) => reason !== null);
+	return [contact(mesh), rootWarning(mesh, geometry), backlash(mesh, geometry)].filter(
+		(reason) => reason !== null
+	);
 }
 
 function contact({ contactRatio, overlapRatio }: Mesh): Reason | null {
@@ -30,10 +32,10 @@ function contact({ contactRatio, overlapRatio }: Mesh): Reason | null {
 			};
 }
 
-/** An undercut root makes room for the mate's tips; interference without it digs in. */
-function rootWarning({ undercut, interference }: Mesh): Reason | null {
+/** An undercut root makes room for tips that reach no deeper than a rack's; an internal gear's do. */
+function rootWarning({ undercut, interference }: Mesh, { wheel }: MeshGeometry): Reason | null {
 	if (!interference) return null;
-	return undercut.gear || undercut.mate
+	return (undercut.gear || undercut.mate) && wheel.kind !== 'internal'
 		? {
 				code: 'undercut',
 				text: 'The teeth of the smaller gear are undercut at the root, where the tips of its mate reach. A hobbed gear has room there; one of another make may not.'

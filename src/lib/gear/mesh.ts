@@ -5,16 +5,18 @@
 import { normalBacklash, type BacklashQuestion } from './backlash';
 import { contactPath, interferes, type MeshGeometry } from './contact-path';
 import type { Outcome, Reason } from './contract';
-import { inverseInvolute, involute } from './involute';
+import { tipsFoul } from './internal-tips';
 import { isUndercut, type Member } from './member';
 import {
 	basePitchRefusal,
 	CENTRES_TOO_CLOSE,
+	SHIFTS_DO_NOT_MESH,
 	discontinuousRefusal,
 	helixRefusal,
 	kindsRefusal
 } from './mesh-refusals';
 import { meshWarnings } from './mesh-warnings';
+import { operatingOf } from './operating';
 import { straightDepth } from './rack';
 import { SOURCES } from './sources';
 import { OUT_OF_RANGE } from './refusals';
@@ -46,25 +48,28 @@ export function meshOf(question: MeshQuestion, recorder: Recorder): MeshAnswer {
 	);
 	if (refusals.length > 0) return { figures: null, refusals, warnings: [] };
 
-	const geometry = operating(question, recorder);
-	if (!geometry) return { figures: null, refusals: [CENTRES_TOO_CLOSE], warnings: [] };
-	const contactRatio = contactRatioOf(geometry, gear, recorder);
+	const geometry = operatingOf(question, recorder);
+	if (!geometry) {
+		const refusal = question.centreDistance === null ? SHIFTS_DO_NOT_MESH : CENTRES_TOO_CLOSE;
+		return { figures: null, refusals: [refusal], warnings: [] };
+	}
+	const contactRatio = contactRatioOf(geometry, recorder);
 	const backlash: BacklashQuestion = { ...geometry, measured: question.centreDistance !== null };
 	const figures = {
 		ratio: geometry.ratio,
 		standardCentreDistance: geometry.standardCentre,
 		operatingPressureAngle: (geometry.operatingAngle * 180) / Math.PI,
 		contactRatio,
-		overlapRatio: overlapRatio(gear, question.faceWidth, recorder),
+		overlapRatio: overlapRatio(geometry.pinion, question.faceWidth, recorder),
 		normalBacklash: normalBacklash(backlash, recorder),
 		huntingTooth: isHunting(gear.teeth, mate.teeth),
 		undercut: {
 			gear: isUndercut(gear, straightDepth(gear.rack)),
 			mate: isUndercut(mate, straightDepth(mate.rack))
 		},
-		interference: interferes(geometry)
+		interference: interferes(geometry) || tipsFoul(geometry)
 	};
-	if (![figures.operatingPressureAngle, contactRatio, figures.normalBacklash ?? 0].every(Number.isFinite)) {
+	if (Object.values(figures).some((value) => typeof value === 'number' && !Number.isFinite(value))) {
 		return { figures: null, refusals: [OUT_OF_RANGE], warnings: [] };
 	}
 	const discontinuous = discontinuousRefusal(contactRatio + figures.overlapRatio);
@@ -76,79 +81,11 @@ export function meshOf(question: MeshQuestion, recorder: Recorder): MeshAnswer {
 }
 
 /**
- * Where the two run. C0 = mt (N1 + N2) / 2; with a measured centre distance C, cos αw = C0 cos αt / C; else from the
- * sum of shifts, inv αw = inv αt + 2 (x1 + x2) tan αn / (N1 + N2). An internal gear counts with a minus.
- * Source: Shigley, Mechanical Engineering Design, 8th ed., ch. 13 (edition from memory). Null where no mesh can be.
- */
-function operating({ gear, mate, centreDistance }: MeshQuestion, recorder: Recorder): MeshGeometry | null {
-	const [one, two] = [gear, mate].sort((a, b) => sizeOf(a) - sizeOf(b)) as [Member, Member];
-	if (one.teeth === null) return null;
-	const module = gear.transverseModule;
-	const angle = gear.transverseAngle;
-	if (two.teeth === null) {
-		return {
-			pinion: one,
-			wheel: two,
-			ratio: null,
-			standardCentre: null,
-			centre: null,
-			operatingAngle: angle
-		};
-	}
-	const sign = two.kind === 'internal' ? -1 : 1;
-	const ratio = recorder.step(
-		{ symbol: 'i', name: 'ratio', expression: 'N2 / N1', unit: '1', source },
-		{ N1: one.teeth, N2: two.teeth },
-		({ N1, N2 }) => N2 / N1
-	);
-	const standardCentre = recorder.step(
-		{
-			symbol: 'C0',
-			name: 'standard centre distance',
-			expression: sign === 1 ? 'm · (N2 + N1) / 2' : 'm · (N2 - N1) / 2',
-			unit: 'mm',
-			source
-		},
-		{ m: module, N1: one.teeth, N2: two.teeth },
-		({ m, N1, N2 }) => (m * (N2 + sign * N1)) / 2
-	);
-	const common = { pinion: one, wheel: two, ratio, standardCentre };
-	const degrees = (radians: number) => (radians * 180) / Math.PI;
-	if (centreDistance !== null) {
-		const cosine = (standardCentre * Math.cos(angle)) / centreDistance;
-		if (!(cosine < 1)) return null;
-		recorder.step(
-			{
-				symbol: 'αw',
-				name: 'operating pressure angle at the measured centre distance',
-				expression: 'arccos(C0 · cos(αt) / C)',
-				unit: '°',
-				source
-			},
-			{ C0: standardCentre, αt: degrees(angle), C: centreDistance },
-			() => degrees(Math.acos(cosine))
-		);
-		// At the standard distance the angle is the standard one, to the last digit.
-		const operatingAngle = centreDistance === standardCentre ? angle : Math.acos(cosine);
-		return { ...common, centre: centreDistance, operatingAngle };
-	}
-	const shifts = two.profileShift + sign * one.profileShift;
-	const inv = involute(angle) + (2 * shifts * Math.tan(gear.normalAngle)) / (two.teeth + sign * one.teeth);
-	if (!(inv > 0)) return null;
-	const operatingAngle = shifts === 0 ? angle : inverseInvolute(inv);
-	const centre = (standardCentre * Math.cos(angle)) / Math.cos(operatingAngle);
-	return { ...common, centre, operatingAngle };
-}
-
-function sizeOf({ teeth }: Member): number {
-	return teeth ?? Infinity;
-}
-
-/**
  * Contact ratio in the transverse plane: path of contact over base pitch.
  * Source: Shigley, Mechanical Engineering Design, 8th ed., sec. 13-6 (edition from memory).
  */
-function contactRatioOf(geometry: MeshGeometry, gear: Member, recorder: Recorder): number {
+function contactRatioOf(geometry: MeshGeometry, recorder: Recorder): number {
+	const { transverseModule, transverseAngle } = geometry.pinion;
 	return recorder.step(
 		{
 			symbol: 'mp',
@@ -157,12 +94,8 @@ function contactRatioOf(geometry: MeshGeometry, gear: Member, recorder: Recorder
 			unit: '1',
 			source
 		},
-		{
-			Z: contactPath(geometry),
-			m: gear.transverseModule,
-			αt: (gear.transverseAngle * 180) / Math.PI
-		},
-		({ Z, m }) => Z / (Math.PI * m * Math.cos(gear.transverseAngle))
+		{ Z: contactPath(geometry, recorder), m: transverseModule, αt: (transverseAngle * 180) / Math.PI },
+		({ Z, m }) => Z / (Math.PI * m * Math.cos(transverseAngle))
 	);
 }
 
@@ -178,7 +111,8 @@ function overlapRatio({ helixAngle, normalModule }: Member, faceWidth: number, r
 
 /** Counts without a common factor: every tooth meets every other before the pattern repeats. A rack's do not repeat. */
 function isHunting(one: number | null, other: number | null): boolean {
-	let [a, b] = [one ?? 0, other ?? 0];
+	if (one === null || other === null) return false;
+	let [a, b] = [one, other];
 	while (b > 0) [a, b] = [b, a % b];
 	return a === 1;
 }

@@ -8,5 +8,8 @@
  *        Buckingham; bending of the mate; mesh; comparison with the original; remedies; what limits. The low end of
  *        the margin is taken at the point of steepest fall (was M (1 - 1.645 u)); permitted power is that of the
  *        answer that decides.
+ * 1.1.0  Identification: which gear made the readings, with the next reading. The path of contact ends where the line
+ *        of action leaves the base circles, and the tips of internal pairs are checked for fouling: mesh figures of
+ *        pairs that interfere differ from 1.0.0.
  */
-export const CORE_VERSION = '1.0.0';
+export const CORE_VERSION = '1.1.0';

@@ -1,5 +1,6 @@
 /** The checks that the core is timed with, and the core itself: one entry, bundled as the application is. */
 import type { EvaluateInput } from '$lib/gear/contract';
+import type { IdentifyInput } from '$lib/gear/identify/contract';
 
 export { evaluate } from '$lib/gear/evaluate';
 
@@ -35,3 +36,17 @@ export function geometryCheck(shift: number): EvaluateInput {
 		rules: { formFactor: 'geometry' }
 	};
 }
+
+export { identify } from '$lib/gear/identify/identify';
+
+/** The readings of a usual visit: teeth, outside diameter, whole depth and two spans. */
+export const usualReadings: IdentifyInput = {
+	teeth: 26,
+	prior: 'either',
+	outsideDiameter: { value: 5.597, unit: 'in', uncertainty: 0.001, taken: 'over-tips' },
+	wholeDepth: { value: 0.448, unit: 'in', uncertainty: 0.002 },
+	spans: [
+		{ teeth: 3, value: 1.549, unit: 'in', uncertainty: 0.001 },
+		{ teeth: 4, value: 2.139, unit: 'in', uncertainty: 0.001 }
+	]
+};

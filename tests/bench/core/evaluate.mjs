@@ -1,11 +1,5 @@
 // evaluate.*: one check worked out by the calculation core, with its working and its words, in microseconds.
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
-import { fileURLToPath, pathToFileURL } from 'node:url';
-import { build } from 'vite';
-
-const root = fileURLToPath(new URL('../../..', import.meta.url));
+import { bundledCore, perCall } from './core.mjs';
 
 /** @typedef {import('../figure.mjs').Figure} Figure */
 
@@ -32,39 +26,4 @@ export async function evaluateFigures({ quick = false } = {}) {
 			of: 'one check by geometry, the tooth met before'
 		}
 	};
-}
-
-/** The core as it ships: bundled, not one module at a time through a loader. */
-async function bundledCore() {
-	const folder = mkdtempSync(join(tmpdir(), 'cogmark-bench-'));
-	try {
-		await build({
-			configFile: false,
-			root,
-			logLevel: 'error',
-			resolve: { alias: { $lib: join(root, 'src/lib') } },
-			build: { ssr: join(root, 'tests/bench/core/check.ts'), outDir: folder, emptyOutDir: true }
-		});
-		return await import(pathToFileURL(join(folder, 'check.js')).href);
-	} finally {
-		rmSync(folder, { recursive: true, force: true });
-	}
-}
-
-/**
- * Microseconds a call, over batches of calls; the first batches warm up and do not count.
- * @param {number} batches
- * @param {number} calls in each
- * @param {() => unknown} work
- * @returns {{ samples: number[], unit: string }}
- */
-function perCall(batches, calls, work) {
-	const samples = [];
-	for (let batch = -20; batch < batches; batch++) {
-		const start = performance.now();
-		for (let call = 0; call < calls; call++) work();
-		const each = ((performance.now() - start) * 1000) / calls;
-		if (batch >= 0) samples.push(each);
-	}
-	return { samples, unit: 'µs' };
 }

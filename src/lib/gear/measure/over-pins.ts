@@ -10,7 +10,7 @@ export interface PinGear {
 	teeth: number;
 	module: number;
 	pressureAngle: number;
-	/** Arc thickness on the reference circle, mm; nominal π m / 2 without shift. */
+	/** Arc thickness on the reference circle, mm; `nominalThickness` for teeth that are not thinned. */
 	thickness: number;
 }
 
@@ -26,6 +26,8 @@ export function usualPin(module: number): number {
 /**
  * Measurement M over two pins in mm. inv αM = s / d + inv α + dp / (d cos α) - π / N; M = d cos α / cos αM + dp, and
  * the first term times cos(90° / N) for an odd count.
+ * Range: pins that rest on the flanks. One so thin that it would sink to the base circle is taken to lie on it, which is
+ * the least that could be read.
  * Source: Machinery's Handbook, checking gear size by measurement over wires (from memory).
  * @example overPins({ teeth: 30, module: 1, pressureAngle: Math.PI / 9, thickness: Math.PI / 2 }, 1.728) // 32.4102
  */

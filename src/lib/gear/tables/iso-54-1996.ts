@@ -11,3 +11,9 @@ export const MODULES_SERIES_I: readonly number[] = [
 export const MODULES_SERIES_II: readonly number[] = [
 	1.125, 1.375, 1.75, 2.25, 2.75, 3.5, 4.5, 5.5, 6.5, 7, 9, 11, 14, 18, 22, 28, 36, 45
 ];
+
+/** Fine modules below 1 mm. Source: DIN 780 (from memory). */
+// prettier-ignore
+export const MODULES_BELOW_1: readonly number[] = [
+	0.2, 0.25, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9
+];

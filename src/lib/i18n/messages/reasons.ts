@@ -155,6 +155,10 @@ export const reasons = {
 		'At this centre distance the two cannot stand: their base circles overlap. Check the centre distance and both counts.',
 		'A esta distancia entre centros no caben: sus círculos base se traslapan. Revise la distancia entre centros y ambos conteos.'
 	],
+	'reason.shifts-do-not-mesh': [
+		'With these profile shifts there is no centre distance at which the two run. Check both shifts and counts, or measure the centre distance.',
+		'Con estas correcciones no hay distancia entre centros en la que ambos trabajen. Revise las correcciones y los conteos, o mida la distancia entre centros.'
+	],
 	'reason.contact-ratio-below-one': [
 		'One pair of teeth leaves before the next meets: the contact ratio is {contactRatio}, it must be above 1. Check centre distance, tooth form and wear of the tips.',
 		'Un par de dientes se separa antes de que se junte el siguiente: la relación de contacto es {contactRatio} y debe pasar de 1. Revise la distancia entre centros, la forma y el desgaste de las puntas.'
@@ -245,6 +249,7 @@ export const reasons = {
 		'Engrane interior menor que su piñón'
 	],
 	'reason-short.centres-too-close': ['Centre distance too small', 'Distancia entre centros demasiado corta'],
+	'reason-short.shifts-do-not-mesh': ['Shifts do not mesh', 'Las correcciones no engranan'],
 	'reason-short.contact-ratio-below-one': ['Contact ratio below 1', 'Relación de contacto menor que 1'],
 	'reason-short.undercut-too-deep': ['Undercut too deep', 'Socavado demasiado profundo'],
 	'reason-short.tooth-pointed': ['Pointed teeth', 'Dientes en punta'],

@@ -133,6 +133,14 @@ export const working = {
 		'operating pressure angle at the measured centre distance',
 		'ángulo de presión de trabajo a la distancia entre centros medida'
 	],
+	'working.involute of the operating pressure angle, by the shifts': [
+		'involute of the operating pressure angle, by the shifts',
+		'involuta del ángulo de presión de operación, por las correcciones'
+	],
+	"working.path of contact, from where it leaves the pinion's base circle": [
+		"path of contact, from where it leaves the pinion's base circle",
+		'línea de contacto, desde donde deja el círculo base del piñón'
+	],
 	'working.contact ratio, path of contact over base pitch': [
 		'contact ratio, path of contact over base pitch',
 		'relación de contacto, línea de contacto entre paso base'
