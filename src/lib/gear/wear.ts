@@ -44,23 +44,22 @@ export interface WearAnswer {
 export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 	const none: WearAnswer = { strength: null, figures: null, refusal: null };
 	const { gear, mate, faceWidth, dynamicForce } = question;
-	const wheels = pinionAndWheel(gear, mate);
+	const point = pitchPointOf(gear, mate);
 	const [own, mates] = [surfaceOf(question.gearMaterial), surfaceOf(question.mateMaterial)];
-	if (!wheels || !own || !mates) return none;
+	if (!point || !own || !mates) return none;
 	const refusal = wearRefusal(own, mates);
 	if (refusal) return { ...none, refusal };
 
-	const { pinion, wheel, internal } = wheels;
+	const { pinion, teeth, diameter, wheel, internal } = point;
 	const allowable = buckinghamSurfaceStrength(own.brinell, mates.brinell, recorder);
 	const [elasticOwn, elasticMates] = [elasticOf(own, recorder), elasticOf(mates, recorder.mate())];
-	const angle = gear.normalAngle;
-	const { helixAngle } = gear;
+	const { normalAngle: angle, helixAngle } = pinion;
 	const line = {
 		elastic: elasticCoefficient(elasticOwn, elasticMates, recorder),
 		faceWidth,
 		angle,
 		curvature: pitchPointCurvature(
-			pinion.diameter,
+			diameter,
 			wheel?.diameter ?? null,
 			{ angle, helixAngle, internal },
 			recorder
@@ -69,9 +68,9 @@ export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 	const byContact = hertzLoad(allowable, line, recorder);
 	const wearLoad = buckinghamWearLoad(
 		{
-			pinion: pinion.diameter,
+			pinion: diameter,
 			faceWidth,
-			ratioFactor: buckinghamRatioFactor(pinion.teeth, wheel?.teeth ?? null, internal, recorder),
+			ratioFactor: buckinghamRatioFactor(teeth, wheel?.teeth ?? null, internal, recorder),
 			loadStress: buckinghamLoadStressFactor(
 				allowable,
 				angle,
@@ -112,25 +111,41 @@ export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 	return { strength, figures, refusal: null };
 }
 
-interface Wheel {
+interface PitchPoint {
+	pinion: Member;
+	/** Of the pinion. */
 	teeth: number;
+	/** Pitch diameters where the two roll on each other, mm; a rack is no wheel. */
 	diameter: number;
+	wheel: { teeth: number; diameter: number } | null;
+	internal: boolean;
 }
 
-/** The smaller is the pinion; a rack has no wheel. Null where the two cannot roll on each other. */
-function pinionAndWheel(
-	gear: Member,
-	mate: Member
-): { pinion: Wheel; wheel: Wheel | null; internal: boolean } | null {
-	const wheels = [gear, mate]
-		.flatMap(({ teeth, pitchDiameter: diameter }) =>
-			teeth === null || diameter === null ? [] : [{ teeth, diameter }]
-		)
-		.sort((a, b) => a.teeth - b.teeth);
-	const [pinion, wheel = null] = wheels;
-	const internal = gear.kind === 'internal' || mate.kind === 'internal';
-	if (!pinion || (internal && (!wheel || wheel.teeth <= pinion.teeth))) return null;
-	return { pinion, wheel, internal };
+/**
+ * Pinion and wheel of a pair, whichever of them is asked about. Null where the two cannot roll on each other, and where
+ * the teeth of one are not known. Angles and modules of the two differ only where they agree in base pitch alone: the
+ * pinion's count then, so that the answer is the same from either side and the wheel's circle is in the ratio of the teeth.
+ */
+function pitchPointOf(gear: Member, mate: Member): PitchPoint | null {
+	const [pinion, other] = [gear, mate].sort(bySize) as [Member, Member];
+	const { teeth, pitchDiameter: diameter, transverseModule } = pinion;
+	if (pinion.kind === 'internal' || teeth === null || diameter === null) return null;
+	if (other.kind === 'rack') return { pinion, teeth, diameter, wheel: null, internal: false };
+	const internal = other.kind === 'internal';
+	if (other.teeth === null || (internal && other.teeth === teeth)) return null;
+	const wheel = { teeth: other.teeth, diameter: transverseModule * other.teeth };
+	return { pinion, teeth, diameter, wheel, internal };
+}
+
+/** What has no teeth to count comes last; an internal gear is never the pinion of as many teeth. */
+function bySize(one: Member, other: Member): number {
+	const teeth = (member: Member) => member.teeth ?? Number.MAX_VALUE;
+	const inner = (member: Member) => (member.kind === 'internal' ? 1 : 0);
+	return (
+		teeth(one) - teeth(other) ||
+		inner(one) - inner(other) ||
+		(one.pitchDiameter ?? 0) - (other.pitchDiameter ?? 0)
+	);
 }
 
 interface Surface {

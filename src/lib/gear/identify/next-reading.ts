@@ -4,7 +4,9 @@
  * is weighed.
  */
 import { fromSI } from '../quantity';
+import { memberOf } from '../member';
 import { spanTeeth } from '../measure/span';
+import { spansOnFlank } from '../measure/span-reach';
 import { usualPin } from '../measure/over-pins';
 import type { IdentifyInput, NextReading, ReadingName } from './contract';
 import { READING_NAMES } from './contract';
@@ -68,6 +70,7 @@ export function nextReadingOf(
 	let best: { name: ReadingName; readings: Imagined; score: number } | null = null;
 	for (const name of options) {
 		const readings = imagined(name, input, first);
+		if (readings.length === 0) continue;
 		const drop =
 			entropy(leading.map(({ probability }) => probability)) - doubtAfter(readings, input, leading);
 		const score = drop - EFFORT[name];
@@ -120,22 +123,33 @@ function imagined(name: ReadingName, input: IdentifyInput, leading: Weighed): Im
 	const plain: Observation = { reading: name, value: 0, sigma: SIGMA[name] };
 	if (name === 'overPins') return [{ ...plain, pin: usualPin(leading.hypothesis.kind.module) }];
 	if (name !== 'spans') return [plain];
-	const k = recommendedSpan(leading);
 	const taken = input.spans?.[0]?.teeth;
-	const spans = taken === undefined ? [k, k + 1] : [taken >= k + 1 ? taken - 1 : taken + 1];
-	return spans.map((spanTeeth) => ({ ...plain, spanTeeth: Math.max(2, spanTeeth) }));
+	const { k, fewest, most } = recommendedSpans(leading);
+	const onFlank = (count: number) => count >= fewest && count <= most;
+	if (taken !== undefined) {
+		const neighbour = onFlank(taken + 1) ? taken + 1 : taken - 1;
+		return neighbour >= 2 ? [{ ...plain, spanTeeth: neighbour }] : [];
+	}
+	const pair = onFlank(k + 1) ? [k, k + 1] : onFlank(k - 1) ? [k - 1, k] : [k];
+	return pair.map((spanTeeth) => ({ ...plain, spanTeeth }));
 }
 
-export function recommendedSpan({ hypothesis, evidence }: Weighed): number {
+/** Teeth to span on a candidate, the jaws near the middle of the flanks, and between which counts they touch flanks. */
+function recommendedSpans({ hypothesis, evidence }: Weighed): { k: number; fewest: number; most: number } {
 	const { kind, teeth, helixAngle } = hypothesis;
-	const angle = (kind.pressureAngle * Math.PI) / 180;
-	return spanTeeth({
+	const member = memberOf({
+		kind: helixAngle === 0 ? 'spur' : 'helical',
 		teeth,
-		normalModule: kind.module,
-		normalAngle: angle,
-		transverseAngle: Math.atan(Math.tan(angle) / Math.cos(helixAngle)),
-		profileShift: evidence.shift
+		pitch: { system: 'module', value: kind.module },
+		plane: 'normal',
+		pressureAngle: kind.pressureAngle,
+		form: kind.form,
+		profileShift: evidence.shift,
+		helixAngle: (helixAngle * 180) / Math.PI
 	});
+	const k = spanTeeth({ ...member, teeth });
+	const reach = spansOnFlank(member) ?? { fewest: k, most: k };
+	return { k: Math.min(Math.max(k, reach.fewest), reach.most), ...reach };
 }
 
 /** Middle and width of what a candidate would show, mm; shift and losses as far as the readings leave them. */

@@ -77,6 +77,7 @@ export const verdict = {
 	'remedy.like-for-like': ['As the original was', 'Como era el original'],
 	'remedy.more': ['{n} more', '{n} más'],
 	'remedy.more#one': ['1 more', '1 más'],
+	'remedy.fewer': ['fewer', 'menos'],
 	'verdict.by-speed': ['What it carries, by speed', 'Lo que soporta, según la velocidad'],
 	'verdict.beyond': ["beyond the plant's margin", 'fuera del margen de la planta'],
 	'verdict.this-drive': ['this drive, {power}', 'este mando, {power}'],
