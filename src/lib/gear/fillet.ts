@@ -26,11 +26,13 @@ export function filletPoint(rack: BasicRack, teeth: number, profileShift: number
 	const radius = teeth / 2;
 	const centre = tipCentre(rack);
 	const below = centre.depth - profileShift;
-	const [sine, cosine] = [Math.sin(psi), Math.cos(psi)];
+	const sine = Math.sin(psi);
+	const cosine = Math.cos(psi);
 	const turned = -((below * cosine) / sine + centre.x) / radius;
 	const reach = below / sine + tipRadius;
-	const turn = turnedBy(turned);
-	return { ...turn(-reach * cosine, radius - reach * sine), normal: turn(-cosine, -sine) };
+	const normal = turnedBy(turned, -cosine, -sine);
+	const pitchPoint = turnedBy(turned, 0, radius);
+	return { x: pitchPoint.x + reach * normal.x, y: pitchPoint.y + reach * normal.y, normal };
 }
 
 /** The same on a rack's own tooth, whose fillet is the tool's tip circle itself; y = 0 is the reference line. */
@@ -47,7 +49,8 @@ export function tipCentre({ dedendum, tipRadius, pressureAngle }: BasicRack): { 
 	return { x, depth };
 }
 
-function turnedBy(angle: number): (x: number, y: number) => Point {
-	const [sine, cosine] = [Math.sin(angle), Math.cos(angle)];
-	return (x, y) => ({ x: x * cosine - y * sine, y: x * sine + y * cosine });
+function turnedBy(angle: number, x: number, y: number): Point {
+	const sine = Math.sin(angle);
+	const cosine = Math.cos(angle);
+	return { x: x * cosine - y * sine, y: x * sine + y * cosine };
 }

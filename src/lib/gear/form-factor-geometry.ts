@@ -45,10 +45,7 @@ export function lewisFormFactorByGeometry(
 ): GeometryFormFactor | Reason {
 	const few = fewTeethRefusal(shape.teeth);
 	if (few) return few;
-	return recorded(
-		remembered(shape, () => weakestOfTooth(shape)),
-		recorder
-	);
+	return recorded(remembered(shape, weakestOfTooth), recorder);
 }
 
 /**
@@ -61,10 +58,7 @@ export function rackFormFactor(
 	recorder: Recorder = unrecorded
 ): GeometryFormFactor | Reason {
 	const shape = { teeth: Infinity, rack, profileShift: 0, tipWear };
-	return recorded(
-		remembered(shape, () => weakestOfRack(rack, tipWear)),
-		recorder
-	);
+	return recorded(remembered(shape, weakestOfRack), recorder);
 }
 
 const source = SOURCES.generatedTooth;
@@ -105,7 +99,7 @@ function weakestOfTooth(shape: ToothShape): WeakestSection | Reason {
 	return weakest ? { ...weakest, teeth, rack, profileShift } : LOAD_BELOW_FILLET;
 }
 
-function weakestOfRack(rack: BasicRack, tipWear: number): WeakestSection | Reason {
+function weakestOfRack({ rack, tipWear }: ToothShape): WeakestSection | Reason {
 	const refused = rackRefusal(rack);
 	if (refused) return refused;
 	const tangent = Math.tan(rack.pressureAngle);
@@ -163,10 +157,15 @@ function weakestOf(
 const MOST_REMEMBERED = 32;
 const sections: { shape: ToothShape; section: WeakestSection | Reason }[] = [];
 
-function remembered(shape: ToothShape, work: () => WeakestSection | Reason): WeakestSection | Reason {
-	const known = sections.find((kept) => sameShape(kept.shape, shape));
+function remembered(
+	asked: ToothShape,
+	work: (shape: ToothShape) => WeakestSection | Reason
+): WeakestSection | Reason {
+	const known = sections.find((kept) => sameShape(kept.shape, asked));
 	if (known) return known.section;
-	const section = work();
+	// A copy: the caller may go on to change its shape.
+	const shape = { ...asked, rack: { ...asked.rack } };
+	const section = work(shape);
 	sections.unshift({ shape, section });
 	if (sections.length > MOST_REMEMBERED) sections.pop();
 	return section;

@@ -1,5 +1,5 @@
 /** What about the two members' materials and finish a millwright should be told; none of it changes a verdict. */
-import type { Finish, Gear, Mate, Reason } from './contract';
+import type { Finish, Gear, Mate, Material, Reason } from './contract';
 
 export function pairingWarnings(gear: Gear, mate: Mate): Reason[] {
 	return [reversedHardness(gear, mate), wornMate(mate), rougherMate(gear, mate)].filter(
@@ -9,17 +9,21 @@ export function pairingWarnings(gear: Gear, mate: Mate): Reason[] {
 
 /** The pinion's teeth meet more often, so a hard pinion on a soft wheel is usual. Source: common practice. */
 function reversedHardness(gear: Gear, mate: Mate): Reason | null {
-	const [own, mates] = [gear.material.brinell, mate.material?.brinell];
-	if (own === undefined || mates === undefined || gear.teeth === undefined || mate.teeth === undefined)
-		return null;
+	const [own, mates] = [toldBrinell(gear.material), toldBrinell(mate.material)];
+	if (own === null || mates === null || gear.teeth === undefined || mate.teeth === undefined) return null;
 	if (gear.teeth === mate.teeth) return null;
 	const [pinion, wheel] = gear.teeth < mate.teeth ? [own, mates] : [mates, own];
 	if (wheel <= pinion) return null;
 	return {
 		code: 'hardness-reversed',
-		text: `The wheel is harder (${Math.round(wheel)} HB) than the pinion (${Math.round(pinion)} HB). Usual is a hard pinion on a softer wheel: check which is which.`,
-		values: { pinion: Math.round(pinion), wheel: Math.round(wheel) }
+		text: `The wheel is harder (${wheel} HB) than the pinion (${pinion} HB). Usual is a hard pinion on a softer wheel: check which is which.`,
+		values: { pinion, wheel }
 	};
+}
+
+/** Whole: a difference that rounds away would be told as two equal hardnesses. */
+function toldBrinell(material: Material | undefined): number | null {
+	return material?.brinell === undefined ? null : Math.round(material.brinell);
 }
 
 function wornMate({ worn }: Mate): Reason | null {

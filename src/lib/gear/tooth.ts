@@ -30,8 +30,10 @@ export interface Tooth extends ToothShape {
 
 /** Fewest teeth that are drawn; the Lewis method itself starts at ten. */
 const FEWEST = 8;
-const LEAST_ANGLE = (14.5 * Math.PI) / 180;
-const MOST_ANGLE = (25 * Math.PI) / 180;
+/** Degrees; the tolerance only forgives the arithmetic of an angle that came from another plane. */
+const LEAST_ANGLE = 14.5;
+const MOST_ANGLE = 25;
+const SAME_ANGLE = 1e-6;
 const ROUNDING = 1e-9;
 
 /** The tooth of a shape, or the reason why that rack cuts none. Range: 8 teeth and more, 14.5 to 25 degrees. */
@@ -45,8 +47,8 @@ export function generateTooth(shape: ToothShape): Tooth | Reason {
 	const baseRadius = pitchRadius * Math.cos(rack.pressureAngle);
 	const rootRadius = pitchRadius - rack.dedendum + profileShift;
 	const tipRadius = pitchRadius + rack.addendum + profileShift - tipWear;
-	const flankEnd = pitchRadius * Math.sin(rack.pressureAngle) ** 2 - (straightDepth(rack) - profileShift);
-	const undercut = flankEnd < -ROUNDING * pitchRadius;
+	const deepest = pitchRadius * Math.sin(rack.pressureAngle) ** 2;
+	const undercut = straightDepth(rack) - profileShift > deepest * (1 + ROUNDING);
 	if (!(rootRadius > 0)) return UNDERCUT_TOO_DEEP;
 	const formAngle = undercut ? undercutAngle(shape) : rack.pressureAngle;
 	if (formAngle === null) return UNDERCUT_TOO_DEEP;
@@ -130,7 +132,8 @@ function undercutAngle({ teeth, rack, profileShift, tipWear }: ToothShape): numb
 	// The fillet's angle runs over less than a right angle; the crossing is where it first comes to lie in the tooth.
 	const steps = 64;
 	const at = (i: number) => rack.pressureAngle + ((Math.PI / 2 - rack.pressureAngle) * i) / steps;
-	if (beyondFlank(at(0)) < 0) return null;
+	// The fillet's start itself is never in the tooth, though a slight undercut leaves it so near to the flank that
+	// rounding might say so: it is not asked.
 	const first = Array.from({ length: steps }, (_, i) => i + 1).find((i) => beyondFlank(at(i)) < 0);
 	if (first === undefined) return null;
 	let [outside, inside] = [at(first - 1), at(first)];
@@ -144,16 +147,16 @@ function undercutAngle({ teeth, rack, profileShift, tipWear }: ToothShape): numb
 
 /** Why a rack cuts no tooth that the method knows. */
 export function rackRefusal(rack: BasicRack): Reason | null {
-	const { pressureAngle, tipRadius } = rack;
-	if (pressureAngle < LEAST_ANGLE - ROUNDING || pressureAngle > MOST_ANGLE + ROUNDING) {
-		const degrees = Number(((pressureAngle * 180) / Math.PI).toFixed(3));
+	const degrees = (rack.pressureAngle * 180) / Math.PI;
+	if (!(degrees >= LEAST_ANGLE - SAME_ANGLE && degrees <= MOST_ANGLE + SAME_ANGLE)) {
+		const pressureAngle = Number(degrees.toFixed(3));
 		return {
 			code: 'angle-not-covered',
-			text: `The form factor by geometry reaches from 14.5 to 25 degrees, this tooth has ${degrees} in its normal plane. Check the pressure angle, or have the gear rated by an engineer.`,
-			values: { pressureAngle: degrees }
+			text: `The form factor by geometry reaches from 14.5 to 25 degrees, this tooth has ${pressureAngle} in its normal plane. Check the pressure angle, or have the gear rated by an engineer.`,
+			values: { pressureAngle }
 		};
 	}
-	return tipRadius > largestTipRadius(rack) + ROUNDING ? NO_ROOM_AT_TIP : null;
+	return rack.tipRadius > largestTipRadius(rack) + ROUNDING ? NO_ROOM_AT_TIP : null;
 }
 
 function fewRefusal(teeth: number): Reason | null {

@@ -113,10 +113,11 @@ export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 
 interface PitchPoint {
 	pinion: Member;
-	/** Of the pinion. */
+	/** The pinion's. */
 	teeth: number;
-	/** Pitch diameters where the two roll on each other, mm; a rack is no wheel. */
+	/** The pinion's, mm. */
 	diameter: number;
+	/** Null for a rack. */
 	wheel: { teeth: number; diameter: number } | null;
 	internal: boolean;
 }
@@ -137,15 +138,10 @@ function pitchPointOf(gear: Member, mate: Member): PitchPoint | null {
 	return { pinion, teeth, diameter, wheel, internal };
 }
 
-/** What has no teeth to count comes last; an internal gear is never the pinion of as many teeth. */
+/** The fewer teeth come first, what has none to count last; of equal counts the smaller circle, to be the same each time. */
 function bySize(one: Member, other: Member): number {
 	const teeth = (member: Member) => member.teeth ?? Number.MAX_VALUE;
-	const inner = (member: Member) => (member.kind === 'internal' ? 1 : 0);
-	return (
-		teeth(one) - teeth(other) ||
-		inner(one) - inner(other) ||
-		(one.pitchDiameter ?? 0) - (other.pitchDiameter ?? 0)
-	);
+	return teeth(one) - teeth(other) || (one.pitchDiameter ?? 0) - (other.pitchDiameter ?? 0);
 }
 
 interface Surface {
@@ -192,7 +188,7 @@ function wearRefusal(own: Surface, mates: Surface): Reason | null {
 	if (brinell >= BRINELL_RANGE.from && brinell <= BRINELL_RANGE.to) return null;
 	return {
 		code: 'wear-out-of-range',
-		text: `The wear limit holds for a mean Brinell hardness of ${BRINELL_RANGE.from} to ${BRINELL_RANGE.to}; of this pair it is ${Math.round(brinell)}. Check both hardnesses, or have the wear judged by an engineer.`,
+		text: `The wear limit holds for a mean Brinell hardness of ${BRINELL_RANGE.from} to ${BRINELL_RANGE.to}; of this pair it is ${Number(brinell.toFixed(1))}. Check both hardnesses, or have the wear judged by an engineer.`,
 		values: { brinell, from: BRINELL_RANGE.from, to: BRINELL_RANGE.to }
 	};
 }

@@ -87,6 +87,12 @@ describe('tablet and server', () => {
 		expect(agreementNote(server, server, english).rest).toBe(`1.801 and 1.801, core ${core} on both`);
 	});
 
+	it('agree by the margin that the verdict shows, where wear decides', () => {
+		const wear = { answer: 'wear', margin: 1.3119, marginLow: 1.1, needed: 1.2 } as const;
+		const worn = outcome({ limits: [wear], limitedBy: 'wear' });
+		expect(agreementNote(worn, worn, english).rest).toMatch(/^1\.311 and 1\.311, /);
+	});
+
 	it('forgive what arithmetic does in the tenth place', () => {
 		expect(differences(outcome({ bendingMargin: 1.8019 * (1 + 1e-12) }), server, english)).toEqual([]);
 	});

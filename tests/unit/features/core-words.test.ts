@@ -2,7 +2,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { reasonWords } from '$lib/features/verdict/reason-words';
-import { sourceWords, workingRows } from '$lib/features/verdict/working-words';
+import { decidingLine, sourceWords, workingRows } from '$lib/features/verdict/working-words';
 import { evaluate } from '$lib/gear/evaluate';
 import type { EvaluateInput } from '$lib/gear/contract';
 import { SOURCES } from '$lib/gear/sources';
@@ -137,5 +137,27 @@ describe('working rows', () => {
 		const diameter = rows.find((row) => row.symbol === 'd');
 		expect(diameter).toMatchObject({ value: '114.3', unit: 'mm', inch: '4.5 in' });
 		expect(rows.find((row) => row.symbol === 'M')).toMatchObject({ unit: '', inch: '' });
+	});
+
+	it("says of the mate's lines whose they are, in both languages", () => {
+		const { working } = evaluate(input());
+		const at = working.findIndex(({ symbol, of }) => symbol === 'M' && of === 'mate');
+		expect(workingRows(working, english)[at]?.name).toBe('mate: margin in bending');
+		expect(workingRows(working, spanish)[at]?.name).toMatch(/^conjugado: margen/);
+	});
+
+	it('marks one margin: that of the answer that decides', () => {
+		const { working } = evaluate(input());
+		const marked = (limitedBy: Parameters<typeof decidingLine>[1]) =>
+			working[decidingLine(working, limitedBy)];
+		expect(marked('gear-bending')).toMatchObject({ symbol: 'M' });
+		expect(marked('gear-bending')?.of).toBeUndefined();
+		expect(marked('mate-bending')).toMatchObject({ symbol: 'M', of: 'mate' });
+		const wear = working.filter(({ symbol }) => symbol === 'Mc' || symbol === 'Mw');
+		expect(wear).toHaveLength(2);
+		expect(marked('wear')?.value).toBe(Math.min(...wear.map(({ value }) => value)));
+		// A core before 1.0.0 did not say.
+		expect(marked(undefined)).toBe(marked('gear-bending'));
+		expect(decidingLine([], 'wear')).toBe(-1);
 	});
 });

@@ -1,6 +1,6 @@
 /** Remedies and limits as people read them, in both languages and the plant's units. */
 import { describe, expect, it } from 'vitest';
-import { limitRows } from '$lib/features/verdict/limit-rows';
+import { decidingMargin, limitRows } from '$lib/features/verdict/limit-rows';
 import { remedyLines } from '$lib/features/verdict/remedy-words';
 import { otherReasons, verdictSentence } from '$lib/features/verdict/reason-words';
 import type { EvaluateInput, Outcome } from '$lib/gear/contract';
@@ -42,6 +42,11 @@ const weak = (
 	]
 });
 
+const withFace = (faceWidth: EvaluateInput['gear']['faceWidth']): EvaluateInput => ({
+	...weak(),
+	gear: { ...weak().gear, faceWidth }
+});
+
 const leads = (outcome: Outcome, metric: boolean, of = english) =>
 	remedyLines(outcome, metric, of).map(({ lead }) => lead);
 
@@ -68,6 +73,35 @@ describe('remedies', () => {
 		expect(lines[0]?.rest).toMatch(/^Between that and [\d.]+ kW .* it needs review\.$/);
 		expect(lines.at(-1)?.rest).toMatch(/^Margin in bending \d\.\d\d, low end \d\.\d\d\.$/);
 		expect(lines[0]?.kind).toBe('Change: needs review');
+	});
+
+	it.each([
+		['kW', /at ([\d.]+) kW/, (value: number) => weak({ load: { power: { value, unit: 'kW' } } })],
+		['hp', /\(([\d.]+) hp\)/, (value: number) => weak({ load: { power: { value, unit: 'hp' } } })],
+		['rpm', /at ([\d.]+) rpm/, (value: number) => weak({ speed: { value, unit: 'rpm' } })],
+		['mm', /face of ([\d.]+) mm/, (value: number) => withFace({ value, unit: 'mm' })]
+	] as const)('carries in truth at the %s on the screen, when it is typed in', (_unit, pattern, apply) => {
+		const lead = leads(outcome, true).find((told) => pattern.test(told)) ?? '';
+		expect(evaluate(apply(Number(pattern.exec(lead)?.[1]))).verdict).toBe('carries');
+	});
+
+	it('needs review, and does not fall short, at the figure where review begins', () => {
+		const rest = remedyLines(outcome, true, english)[0]?.rest ?? '';
+		const value = Number(/and ([\d.]+) kW/.exec(rest)?.[1]);
+		expect(evaluate(weak({ load: { power: { value, unit: 'kW' } } })).verdict).toBe('close');
+	});
+
+	it('are told of two materials of one name, each with its margins', () => {
+		const permittedMaterials = [170, 240].map((value) => ({
+			name: 'Steel 40',
+			metallic: true,
+			allowableBending: { value, unit: 'MPa' as const },
+			permitted: true
+		}));
+		const lines = remedyLines(evaluate({ ...weak(), permittedMaterials }), true, english);
+		const steels = lines.filter(({ lead }) => lead === 'It would pass in Steel 40.');
+		expect(steels).toHaveLength(2);
+		expect(steels[0]?.rest).not.toBe(steels[1]?.rest);
 	});
 
 	it('turn a torque down, not up', () => {
@@ -101,6 +135,10 @@ describe('limits', () => {
 		expect(verdictSentence({ ...outcome, verdict: 'will-not-carry' }, english)).toBe(
 			'Wear of the pair decides.'
 		);
+		expect(verdictSentence({ ...outcome, verdict: 'will-not-carry' }, spanish)).toBe(
+			'Decide el desgaste del par.'
+		);
+		expect(decidingMargin(outcome)).toBe(1);
 	});
 
 	it('of an older core are its bending with what the plant needed', () => {

@@ -2,6 +2,7 @@
  * Where the tablet's outcome and the server's differ, figure by figure, for a page that must not hide it. What
  * counts as different is what the server decided by when the record arrived.
  */
+import { decidingMargin } from '$lib/features/verdict/limit-rows';
 import type { Outcome } from '$lib/gear/contract';
 import type { MessageKey } from '$lib/i18n/catalogue';
 import type { Words } from '$lib/i18n/context.svelte';
@@ -67,7 +68,7 @@ function figureWords(value: number | null, unit: string, { t, language }: Words)
 	return value === null ? t('differences.none') : `${figure(value, 10, language)} ${unit}`.trim();
 }
 
-/** The note beside the verdict where both came to the same. */
+/** The note beside the verdict where both came to the same, with the margin that the verdict shows. */
 export function agreementNote(
 	tablet: Outcome,
 	server: Outcome,
@@ -79,15 +80,16 @@ export function agreementNote(
 		return { lead, rest: t('differences.agree-cores', { tablet: tablet.core, server: server.core }) };
 	}
 	const { core } = server;
-	if (tablet.bendingMargin === null || server.bendingMargin === null) {
+	const [tablets, servers] = [decidingMargin(tablet), decidingMargin(server)];
+	if (tablets === null || servers === null) {
 		return { lead, rest: t('differences.agree-verdict', { core }) };
 	}
 	const shown = (value: number) => fixed(Math.floor(value * 1000 + 1e-9) / 1000, 3, language);
 	return {
 		lead,
 		rest: t('differences.agree-figures', {
-			tablet: shown(tablet.bendingMargin),
-			server: shown(server.bendingMargin),
+			tablet: shown(tablets),
+			server: shown(servers),
 			core
 		})
 	};

@@ -1,4 +1,4 @@
-/** What limits a check, row by row: the answer that decides first. */
+/** What limits a check, row by row, the answer that decides first; and the margin that it decides by. */
 import type { Limit, Outcome } from '$lib/gear/contract';
 
 /**
@@ -13,4 +13,10 @@ export function limitRows(
 		return [...limits].sort((a, b) => Number(b.answer === limitedBy) - Number(a.answer === limitedBy));
 	}
 	return margin === null || marginLow === null ? [] : [{ answer: 'gear-bending', margin, marginLow, needed }];
+}
+
+/** Margin of the answer that decides; null where no answer was computed. */
+export function decidingMargin(outcome: Outcome): number | null {
+	// What the plant needs does not enter the margin.
+	return limitRows(outcome, NaN)[0]?.margin ?? null;
 }

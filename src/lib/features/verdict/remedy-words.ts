@@ -3,6 +3,7 @@ import type { Finish, Outcome, Quantity, Remedy } from '$lib/gear/contract';
 import { fromSI, toSI, type Unit } from '$lib/gear/quantity';
 import type { Words } from '$lib/i18n/context.svelte';
 import { figure, margin } from '$lib/i18n/format';
+import { boundFigure, type Bound } from './bound-figure';
 
 export interface RemedyLine {
 	/** What would do, in one sentence without its end. */
@@ -18,9 +19,10 @@ export function remedyLines(outcome: Outcome, metric: boolean, words: Words): Re
 
 function lineOf(remedy: Remedy, outcome: Outcome, metric: boolean, words: Words): RemedyLine {
 	const { t } = words;
-	const told = (value: Remedy['value']) => valueWords(remedy, value, metric, words);
 	const { carriesAt, value } = remedy;
 	const direction = directionOf(remedy, outcome);
+	const bound = direction === 'least' || direction === 'faster' ? 'at-least' : 'at-most';
+	const told = (at: Remedy['value']) => valueWords(remedy, at, { metric, bound }, words);
 	const lead =
 		carriesAt === null
 			? t(`remedy.review.${direction}`, { what: told(value) })
@@ -71,13 +73,14 @@ function speedNow({ unit }: Quantity<string>, { pitchLineVelocity, pitchDiameter
 function valueWords(
 	{ change }: Remedy,
 	value: Remedy['value'],
-	metric: boolean,
+	{ metric, bound }: { metric: boolean; bound: Bound },
 	{ t, language }: Words
 ): string {
 	if (typeof value === 'string') return change === 'finish' ? t(`gear.finish.${value as Finish}`) : value;
 	const si = toSI({ value: value.value, unit: value.unit as Unit });
-	const shown = (unit: Unit) => `${figure(fromSI(si, unit), 3, language)} ${unit}`;
+	const digits = (at: number, count: number) => figure(boundFigure(at, count, bound), count, language);
+	const shown = (unit: Unit) => `${digits(fromSI(si, unit), 3)} ${unit}`;
 	if (change === 'power') return `${shown(metric ? 'kW' : 'hp')} (${shown(metric ? 'hp' : 'kW')})`;
 	if (change === 'faceWidth') return t('remedy.face', { width: shown(metric ? 'mm' : 'in') });
-	return `${figure(value.value, 4, language)} ${value.unit}`;
+	return `${digits(value.value, 4)} ${value.unit}`;
 }

@@ -2,7 +2,7 @@
  * The working as a person reads it: names and the prose of sources in the language of the page, figures with their
  * unit, and the inch unit beside it where the machine is an inch one. Symbols and titles of books stay.
  */
-import type { WorkingLine } from '$lib/gear/contract';
+import type { LimitName, WorkingLine } from '$lib/gear/contract';
 import { fromSI, type Unit } from '$lib/gear/quantity';
 import { isMessage } from '$lib/i18n/catalogue';
 import type { Words } from '$lib/i18n/context.svelte';
@@ -43,6 +43,20 @@ export function workingRows(lines: readonly WorkingLine[], words: Words): Workin
 		inch: inchWords(value, unit, words),
 		source: sourceWords(source, words)
 	}));
+}
+
+/**
+ * Where the margin that decides stands among the lines; -1 where there is none. Wear is the lesser of its two
+ * methods. An outcome of a core before 1.0.0 does not say what decides: bending of this gear, all that it knew.
+ */
+export function decidingLine(lines: readonly WorkingLine[], limitedBy?: LimitName | null): number {
+	const among = (belongs: (line: WorkingLine) => boolean) =>
+		lines.filter(belongs).sort((a, b) => a.value - b.value)[0];
+	const line =
+		limitedBy === 'wear'
+			? among(({ symbol }) => symbol === 'Mc' || symbol === 'Mw')
+			: among(({ symbol, of }) => symbol === 'M' && (of === 'mate') === (limitedBy === 'mate-bending'));
+	return line ? lines.indexOf(line) : -1;
 }
 
 function nameWords(name: string, of: WorkingLine['of'], words: Words): string {
