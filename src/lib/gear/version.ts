@@ -10,7 +10,7 @@
  *        answer that decides.
  * 1.1.0  Identification: which gear made the readings, with the next reading. The path of contact ends where the line
  *        of action leaves the base circles, and the tips of internal pairs are checked for fouling: mesh figures of
- *        pairs that interfere differ from 1.0.0. Barely undercut teeth get their form factor by geometry (were refused). Wear of pairs that agree in base pitch alone goes by the pinion's
- *        angle and the ratio of teeth.
+ *        pairs that interfere differ from 1.0.0. Barely undercut teeth get their form factor by geometry (were
+ *        refused). Wear of pairs that agree in base pitch alone goes by the pinion's angle and the ratio of teeth.
  */
 export const CORE_VERSION = '1.1.0';
