@@ -7,40 +7,31 @@ import { readSettings } from '../../scripts/lib/settings.mjs';
 import { evaluateFigures } from './core/evaluate.mjs';
 import { identifyFigures } from './core/identify.mjs';
 import { table, told } from './figure.mjs';
+import { USAGE, mayMeasure, readOptions } from './options.mjs';
 
 /** By the first part of the names that they measure. */
 const BENCHES = { evaluate: evaluateFigures, identify: identifyFigures };
 
-const USAGE = `Usage: npm run bench [-- --only NAME] [--quick]\n\nNames begin with: ${Object.keys(BENCHES).join(', ')}\n`;
-
-/** @param {string[]} args */
-function options(args) {
-	const asked = { only: '', quick: false };
-	for (let i = 0; i < args.length; i++) {
-		if (args[i] === '--quick') asked.quick = true;
-		else if (args[i] === '--only' && args[i + 1]) asked.only = String(args[++i]);
-		else return null;
-	}
-	return asked;
-}
-
-const asked = options(process.argv.slice(2));
-const chosen = Object.entries(BENCHES).filter(
-	([part]) => asked && (part.startsWith(asked.only) || asked.only.startsWith(part))
-);
-if (!asked || chosen.length === 0) {
-	process.stderr.write(USAGE);
-	process.exit(2);
-}
+const asked = readOptions(process.argv.slice(2));
+if (!asked) refuse();
 
 /** @type {Record<string, import('./figure.mjs').Told>} */
 const figures = {};
+const chosen = Object.entries(BENCHES).filter(([part]) => mayMeasure(part, asked.only));
 for (const [, measure] of chosen) {
 	for (const [name, figure] of Object.entries(await measure({ quick: asked.quick }))) {
 		if (name.startsWith(asked.only)) figures[name] = told(figure);
 	}
 }
+// A name that nothing answers to must not replace the figures of an earlier run by none.
+if (Object.keys(figures).length === 0) refuse();
 console.log(table(figures));
 const { dataDir } = readSettings(process.env);
 mkdirSync(dataDir, { recursive: true });
 writeFileSync(join(dataDir, 'bench.json'), `${JSON.stringify(figures, null, '\t')}\n`);
+
+/** @returns {never} */
+function refuse() {
+	process.stderr.write(`${USAGE}\n\nNames begin with: ${Object.keys(BENCHES).join(', ')}\n`);
+	process.exit(2);
+}

@@ -1,7 +1,9 @@
 /** Checks of an older core: answered again from what was stored, shown beside what they said, and never changed. */
+import { spawnSync } from 'node:child_process';
+import { fileURLToPath } from 'node:url';
 import { and, eq } from 'drizzle-orm';
-import { expect, test } from 'vitest';
-import type { Verdict } from '$lib/gear/contract';
+import { describe, expect, test } from 'vitest';
+import type { Outcome, Verdict } from '$lib/gear/contract';
 import { CORE_VERSION } from '$lib/gear/version';
 import type { Envelope } from '$lib/records/envelope';
 import { reviseMaterial } from '$lib/server/commands/materials';
@@ -16,14 +18,20 @@ import { makeRecord, makeTablet, pushOf } from './fixtures/record';
 const { web, owner } = testDatabases();
 
 /** Stores checks, then makes the rows look as if an older core had computed them. */
-async function keptByOlderCore(plant: TestPlant, verdict: Verdict, count = 1): Promise<Envelope[]> {
+async function keptByOlderCore(
+	plant: TestPlant,
+	verdict: Verdict,
+	count = 1,
+	bendingMargin?: number
+): Promise<Envelope[]> {
 	const tablet = makeTablet();
 	const records: Envelope[] = [];
 	for (let n = 0; n < count; n++) records.push(await makeRecord(plant, tablet));
 	await storeRecords(plant.scope.millwright, pushOf(tablet, records));
 	for (const record of records) {
 		const { limits: _limits, limitedBy: _limitedBy, ...older } = record.body.outcome;
-		const serverOutcome = { ...older, core: '0.0.9', verdict } as typeof record.body.outcome;
+		const margin = bendingMargin ?? older.bendingMargin;
+		const serverOutcome = { ...older, core: '0.0.9', verdict, bendingMargin: margin } as Outcome;
 		await asOwner(owner, plant.id, (tx) =>
 			tx
 				.update(checks)
@@ -81,4 +89,84 @@ test("another plant's checks are not there", async () => {
 	const [record] = await keptByOlderCore(plant, 'carries');
 	expect(await recomputedCheck(other.scope.supervisor, record?.id ?? '')).toBeNull();
 	expect((await recomputedChecks(other.scope.supervisor, 0)).checks).toEqual([]);
+});
+
+describe('the command for the operator', () => {
+	const root = fileURLToPath(new URL('../..', import.meta.url));
+
+	/** A real process on the tests' database, as `npm run -s recompute` starts it. */
+	function recompute(...args: string[]) {
+		const { status, stdout, stderr } = spawnSync(process.execPath, ['scripts/recompute.mjs', ...args], {
+			cwd: root,
+			encoding: 'utf8',
+			maxBuffer: 2 ** 26,
+			env: {
+				...process.env,
+				DATABASE_URL: process.env['TEST_DATABASE_URL'],
+				DATABASE_OWNER_URL: process.env['TEST_DATABASE_OWNER_URL']
+			}
+		});
+		return { status, stderr, lines: stdout.trimEnd().split('\n') };
+	}
+
+	interface Line {
+		plant?: { id: string; name: string };
+		check?: string;
+		summary?: Record<string, unknown>;
+	}
+	/** Other test files fill the same database: only the lines of one's own plants tell anything. */
+	const linesOf = (plant: TestPlant, lines: string[]) =>
+		lines.map((line) => JSON.parse(line) as Line).filter((line) => line.plant?.id === plant.id);
+
+	test('prints what changed in each plant, leaves out what did not, and writes nothing', async () => {
+		const [plant, other] = [await makePlant(web, owner), await makePlant(web, owner)];
+		const [verdict] = await keptByOlderCore(plant, 'not-permitted');
+		if (!verdict) throw new Error('a record was needed');
+		const { verdict: now, bendingMargin } = verdict.body.outcome;
+		const [margin] = await keptByOlderCore(other, now, 1, 0.25);
+		const [same] = await keptByOlderCore(other, now);
+		const before = [await rowsOf(plant), await rowsOf(other)];
+
+		const json = recompute('--json');
+		expect(json).toMatchObject({ status: 0, stderr: '' });
+		expect(linesOf(plant, json.lines)).toEqual([
+			{
+				plant: { id: plant.id, name: plant.name },
+				check: verdict.id,
+				was: { core: '0.0.9', verdict: 'not-permitted', bendingMargin },
+				now: { core: CORE_VERSION, verdict: now, bendingMargin },
+				verdictChanged: true,
+				marginChanged: false
+			}
+		]);
+		expect(linesOf(other, json.lines)).toMatchObject([
+			{
+				check: margin?.id,
+				was: { bendingMargin: 0.25 },
+				now: { bendingMargin },
+				verdictChanged: false,
+				marginChanged: true
+			}
+		]);
+		const { summary } = JSON.parse(json.lines.at(-1) ?? '') as Line;
+		expect(summary).toMatchObject({ core: CORE_VERSION });
+
+		const text = recompute();
+		expect(text).toMatchObject({ status: 0, stderr: '' });
+		const line = (id: string | undefined) => text.lines.find((printed) => printed.includes(String(id)));
+		expect(line(verdict.id)).toContain(
+			`${plant.name}  ${verdict.id}  core 0.0.9 -> ${CORE_VERSION}  VERDICT not-permitted -> ${now}`
+		);
+		expect(line(margin?.id)).toMatch(`verdict ${now}, the same  bending margin 0.25 -> `);
+		expect(line(same?.id)).toBeUndefined();
+		expect(text.lines.at(-1)).toMatch(/^Plants: \d+\. Checks of another core than /);
+		expect([await rowsOf(plant), await rowsOf(other)]).toEqual(before);
+	});
+
+	test('goes on after the first batch', async () => {
+		const plant = await makePlant(web, owner);
+		const records = await keptByOlderCore(plant, 'not-permitted', 201);
+		const found = linesOf(plant, recompute('--json').lines).map(({ check }) => check);
+		expect(found).toEqual(records.map(({ id }) => id));
+	});
 });

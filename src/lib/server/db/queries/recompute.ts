@@ -32,7 +32,7 @@ const BATCH = 200;
 
 /** A plant's checks that another core computed, by arrival. @param after the `next` of the page before, or 0 */
 export function recomputedChecks(
-	scope: Scope,
+	scope: Pick<Scope, 'database' | 'plantId'>,
 	after: number
 ): Promise<{ checks: RecomputedCheck[]; next: number | null }> {
 	return readPlant(scope, async (tx) => {
