@@ -175,6 +175,24 @@ export interface WorkingLine {
 	of?: 'mate' | undefined;
 }
 
+/** A gear that the readings left standing, and what was found for it. */
+export interface TriedGear {
+	teeth: number;
+	pitch: Pitch;
+	pressureAngle: number;
+	form: 'full-depth' | 'stub';
+	/** In modules. */
+	profileShift: number;
+	probability: number;
+	verdict: Verdict;
+	limitedBy: LimitName | null;
+	/** Of the answer that decides for this gear. */
+	margin: number | null;
+	marginLow: number | null;
+	/** Whether this is the gear whose figures the outcome shows. */
+	decides: boolean;
+}
+
 export interface Outcome {
 	/** Version of the calculation core that answered. */
 	core: string;
@@ -233,6 +251,8 @@ export interface Outcome {
 	reasons: Reason[];
 	remedies: Remedy[];
 	working: WorkingLine[];
+	/** Of a check that was left open between several gears: each of them, likeliest first. */
+	gears?: TriedGear[] | undefined;
 }
 
 /** What bad input is answered with, everywhere. `path` names the field, `message` says what to do. */

@@ -7,6 +7,7 @@ import { checkPage } from './messages/check-page';
 import { common } from './messages/common';
 import { door } from './messages/door';
 import { gear } from './messages/gear';
+import { identify } from './messages/identify';
 import { materials } from './messages/materials';
 import { office } from './messages/office';
 import { reasons } from './messages/reasons';
@@ -20,6 +21,7 @@ const catalogue = {
 	...common,
 	...door,
 	...gear,
+	...identify,
 	...materials,
 	...office,
 	...reasons,

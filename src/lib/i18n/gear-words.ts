@@ -1,12 +1,46 @@
 /** A known gear or drive in one line of the trade's words. */
 import type { Words } from './context.svelte';
-import { figure } from './format';
+import { figure, fixed } from './format';
 import type { ChosenPitch, KnownDrive, KnownGear } from '$lib/records/mirror';
 
 export function pitchWords(pitch: ChosenPitch, { t, language }: Pick<Words, 't' | 'language'>): string {
-	return t(pitch.system === 'diametral' ? 'gear.diametral-pitch' : 'gear.module', {
-		value: figure(pitch.value, 5, language)
-	});
+	const value = figure(pitch.value, 5, language);
+	switch (pitch.system) {
+		case 'diametral':
+			return t('gear.diametral-pitch', { value });
+		case 'module':
+			return t('gear.module', { value });
+		case 'circular':
+			return t('gear.circular-pitch', { value, unit: pitch.unit });
+	}
+}
+
+/** A shift below this (modules) is a tolerance of cutting, not a property of the gear. */
+const SHOWN_SHIFT = 0.03;
+
+export function isShifted(profileShift: number): boolean {
+	return Math.abs(profileShift) >= SHOWN_SHIFT;
+}
+
+export interface NamedGear {
+	pitch: ChosenPitch;
+	pressureAngle: number;
+	form: 'full-depth' | 'stub';
+	/** In modules. */
+	profileShift: number;
+}
+
+/** "DP 5, 20°, full depth", and "shifted +0.21" where it is. */
+export function gearName({ pitch, pressureAngle, form, profileShift }: NamedGear, words: Words): string {
+	const { t, language } = words;
+	const named = pitchWords(pitch, words);
+	const size = `${profileShift < 0 ? '−' : '+'}${fixed(Math.abs(profileShift), 2, language)}`;
+	return [
+		named.charAt(0).toUpperCase() + named.slice(1),
+		`${pressureAngle}°`,
+		t(`gear.form.${form}`),
+		...(isShifted(profileShift) ? [t('gear.shifted', { shift: size })] : [])
+	].join(', ');
 }
 
 export function gearWords(gear: KnownGear, words: Words): string {

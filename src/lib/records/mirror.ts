@@ -11,7 +11,12 @@ const length = z.strictObject({ value: z.number().positive(), unit: z.enum(['mm'
 
 export const pitch = z.discriminatedUnion('system', [
 	z.strictObject({ system: z.literal('diametral'), value: z.number().positive().max(200) }),
-	z.strictObject({ system: z.literal('module'), value: z.number().positive().max(100) })
+	z.strictObject({ system: z.literal('module'), value: z.number().positive().max(100) }),
+	z.strictObject({
+		system: z.literal('circular'),
+		value: z.number().positive().max(1000),
+		unit: z.enum(['in', 'mm'])
+	})
 ]);
 export type ChosenPitch = z.infer<typeof pitch>;
 

@@ -1,9 +1,11 @@
 /** The outcome of a check as it travels in a record: the zod twin of the core's `Outcome`. */
 import { z } from 'zod';
 import type { Outcome } from '$lib/gear/contract';
+import { pitch } from './mirror';
 
 const figure = z.number().nullable();
 const text = z.string().max(2000);
+const verdict = z.enum(['carries', 'close', 'will-not-carry', 'not-permitted', 'cannot-say']);
 const limitName = z.enum(['gear-bending', 'mate-bending', 'wear']);
 /** A value with its unit, or the name of a finish or material. */
 const remedyValue = z.union([z.string().max(200), z.object({ value: z.number(), unit: z.string().max(20) })]);
@@ -61,7 +63,7 @@ export const outcome: z.ZodType<Outcome> = z.object({
 		})
 		.nullable(),
 	original: z.object({ bendingCapacityRatio: z.number(), wearCapacityRatio: figure }).nullable(),
-	verdict: z.enum(['carries', 'close', 'will-not-carry', 'not-permitted', 'cannot-say']),
+	verdict,
 	reasons: z
 		.array(
 			z.object({
@@ -96,5 +98,23 @@ export const outcome: z.ZodType<Outcome> = z.object({
 				of: z.literal('mate').optional()
 			})
 		)
+		.max(100),
+	gears: z
+		.array(
+			z.object({
+				teeth: z.number(),
+				pitch,
+				pressureAngle: z.number(),
+				form: z.enum(['full-depth', 'stub']),
+				profileShift: z.number(),
+				probability: z.number(),
+				verdict,
+				limitedBy: limitName.nullable(),
+				margin: figure,
+				marginLow: figure,
+				decides: z.boolean()
+			})
+		)
 		.max(100)
+		.optional()
 });

@@ -1,5 +1,6 @@
 /** The plant's rules in one revision: what margin is needed, which laws apply, what a service factor is taken from. */
 import { z } from 'zod';
+import { instrumentRules } from './instruments';
 
 const limit = z.strictObject({ value: z.number().positive(), unit: z.enum(['m/s', 'ft/min']) }).nullable();
 
@@ -22,6 +23,8 @@ export const plantRules = z.strictObject({
 		load: z.number().min(0).max(0.5),
 		speed: z.number().min(0).max(0.5)
 	}),
-	serviceFactors: z.array(serviceFactor).min(1)
+	serviceFactors: z.array(serviceFactor).min(1),
+	/** How far the plant trusts its tools, where it differs from what is usual. */
+	instruments: instrumentRules.optional()
 });
 export type PlantRules = z.infer<typeof plantRules>;

@@ -24,15 +24,12 @@ describe('a draft', () => {
 			{ plantId: who.plantId, authorId: who.personId, machineId: 'm', positionId: 'p', step: 'teeth' },
 			NOW
 		);
+		const entry = { field: 'outsideDiameter', unit: 'mm', source: 'keypad', again: false } as const;
 		for (const text of ['2', '24', '24.', '24.5']) {
-			await saveDraft(first, { ...draft, entry: { field: 'outsideDiameter', text, unit: 'mm' } }, NOW);
+			await saveDraft(first, { ...draft, entry: { ...entry, text } }, NOW);
 		}
 		await first.close();
-		expect((await readDraft(tab(name), draft.id))?.entry).toEqual({
-			field: 'outsideDiameter',
-			text: '24.5',
-			unit: 'mm'
-		});
+		expect((await readDraft(tab(name), draft.id))?.entry).toEqual({ ...entry, text: '24.5' });
 	});
 
 	it('may be a reactive object of a screen', async () => {

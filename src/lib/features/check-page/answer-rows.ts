@@ -3,13 +3,14 @@
  * it came from. What was not given says so; nothing is filled in.
  */
 import { otherUnit } from '$lib/features/check/reading/fields';
+import { repeatWords } from '$lib/features/check/reading/repeat-words';
 import { fromSI, toSI } from '$lib/gear/quantity';
 import { isMessage } from '$lib/i18n/catalogue';
 import type { Words } from '$lib/i18n/context.svelte';
 import { figure } from '$lib/i18n/format';
 import { pitchWords } from '$lib/i18n/gear-words';
 import type { CheckAnswers } from '$lib/records/check';
-import { isReading, type AnsweredReading, type ReadingUnit } from '$lib/records/reading';
+import { isPlain, isReading, type AnsweredReading, type ReadingUnit } from '$lib/records/reading';
 
 export interface AnswerRow {
 	label: string;
@@ -21,14 +22,40 @@ export interface AnswerRow {
 	source: string;
 }
 
+/** Asked of every gear: a gap shows. */
 const MEASURED = ['teeth', 'outsideDiameter', 'faceWidth'] as const;
+/** Taken where they tell something: shown where there is an answer. */
+const MORE = [
+	'secondCount',
+	'wholeDepth',
+	'rootDiameter',
+	'helixAngle',
+	'mateTeeth',
+	'centreDistance',
+	'chordalThickness',
+	'pinDiameter',
+	'overPins',
+	'circularPitch'
+] as const;
 const LOADS = ['power', 'torque'] as const;
 
 export function readingRows(answers: CheckAnswers, words: Words): AnswerRow[] {
 	const { t } = words;
 	const byHand = t('check-page.from.hand');
-	return [
+	const read = [
 		...MEASURED.map((name) => readingRow(t(`field.${name}`), answers[name], words)),
+		...answers.spans.map(({ teeth, reading }) =>
+			readingRow(t('field.span-over', { n: teeth }), reading, words)
+		),
+		...MORE.flatMap((name) => {
+			const answer: AnsweredReading = answers[name];
+			return answer === null ? [] : [readingRow(t(`field.${name}`), answer, words)];
+		}),
+		...worn(answers, words)
+	];
+	if (answers.severalGears) return [...read, plainRow(t('check-page.gear'), t('check-page.left-open'), '')];
+	return [
+		...read,
 		chosenRow(t('field.pitch'), answers.pitch ? pitchWords(answers.pitch, words) : '', byHand, words),
 		chosenRow(
 			t('field.pressureAngle'),
@@ -38,6 +65,16 @@ export function readingRows(answers: CheckAnswers, words: Words): AnswerRow[] {
 		),
 		chosenRow(t('field.form'), answers.form ? t(`gear.form.${answers.form}`) : '', byHand, words)
 	];
+}
+
+/** How the outside diameter was taken, and what is worn: where it is not the usual case. */
+function worn({ outsideDiameterTaken, tipWorn, flanksWorn }: CheckAnswers, { t }: Words): AnswerRow[] {
+	const said = [
+		...(outsideDiameterTaken === 'over-tips' ? [] : [t(`how.${outsideDiameterTaken}`)]),
+		...(tipWorn ? [t('how.tips-worn')] : []),
+		...(flanksWorn ? [t('how.flanks-worn')] : [])
+	];
+	return said.length === 0 ? [] : [plainRow(t('check-page.how-taken'), said.join('; '), '')];
 }
 
 /** @param material the spare's, with its allowable stress in words; null where none was chosen */
@@ -78,12 +115,14 @@ function readingRow(label: string, answer: AnsweredReading, words: Words): Answe
 	if (!isReading(answer)) {
 		return plainRow(label, t(answer ? 'check-page.cannot-measure' : 'check-page.not-given'), '', false);
 	}
+	const { typed, value, unit, source, instrument } = answer;
+	const repeats = repeatWords(answer, words);
 	return {
 		label,
-		typed: withUnit(answer.typed, answer.unit, words),
+		typed: withUnit(typed, unit, words),
 		given: true,
-		other: otherWords(answer.value, answer.unit, words),
-		source: t(`check-page.from.${answer.source}`)
+		other: [otherWords(value, unit, words), repeats].filter(Boolean).join('; '),
+		source: instrument ? t(`tool.${instrument}`) : t(`check-page.from.${source}`)
 	};
 }
 
@@ -103,7 +142,7 @@ function withUnit(typed: string, unit: ReadingUnit, { t }: Words): string {
 
 function otherWords(value: number, unit: ReadingUnit, { t, language }: Words): string {
 	const other = otherUnit(unit);
-	if (other === null || unit === 'teeth' || unit === 'x') return '';
+	if (other === null || isPlain(unit)) return '';
 	const key = `unit.${other}`;
 	const shown = figure(fromSI(toSI({ value, unit }), other), 5, language);
 	return `${shown} ${isMessage(key) ? t(key) : other}`;

@@ -15,7 +15,7 @@ export interface Difference {
 }
 
 type FigureName = {
-	[Name in keyof Outcome]: Outcome[Name] extends number | null ? Name : never;
+	[Name in keyof Outcome]-?: Outcome[Name] extends number | null ? Name : never;
 }[keyof Outcome];
 
 /** Figures with the words and the unit in which they are compared. */

@@ -2,10 +2,11 @@
  * One check on the screen: a draft that is kept with every keystroke, or a record that was kept and no longer
  * changes. It holds no rule of its own: what the answers come to is asked of the core through `answerCheck`.
  */
-import { answerCheck } from '$lib/records/answer-check';
-import { assembleInput, type PlantSide } from '$lib/records/assemble';
+import { answerCheck, answerWithQuestion } from '$lib/records/answer-check';
+import type { PlantSide } from '$lib/records/assemble';
 import { noAnswers, type CheckAnswers } from '$lib/records/check';
 import type { CheckRow, MachineRow, MaterialRow, PositionRow, RulesRow } from '$lib/records/mirror';
+import { whichGears } from '$lib/records/which-gear';
 import type { Draft, KeptRecord, LocalPerson, Tablet } from '$lib/tablet/start';
 
 export type Loaded = 'draft' | 'kept' | 'not-here' | 'no-mirror';
@@ -37,11 +38,12 @@ export class OpenCheck {
 	#plantSide: PlantSide | null = $derived(
 		this.rules && { material: this.material, rules: this.rules.rules, offered: this.materials }
 	);
-	question = $derived(this.#plantSide && assembleInput(this.answers, this.#plantSide, this.moment));
-	outcome = $derived.by(() => {
-		if (this.record) return this.record.record.body.outcome;
-		return this.#plantSide && answerCheck(this.answers, this.#plantSide, this.moment);
-	});
+	#answered = $derived(this.#plantSide && answerWithQuestion(this.answers, this.#plantSide, this.moment));
+	/** What the core is asked; of several gears that of the weakest, null while something is missing. */
+	question = $derived(this.#answered?.question ?? null);
+	outcome = $derived(this.record?.record.body.outcome ?? this.#answered?.outcome ?? null);
+	/** What the readings say of the gear, and which gears the check is answered for. */
+	which = $derived(whichGears(this.answers, this.rules?.rules.instruments));
 
 	constructor(tablet: Tablet, person: LocalPerson, id: string) {
 		this.#tablet = tablet;
@@ -65,7 +67,8 @@ export class OpenCheck {
 		this.record = record ?? null;
 		// What is on the screen is newer than what was read while it was being typed.
 		const own = draft?.plantId === plant && draft.authorId === this.#person.personId;
-		if (!this.draft) this.draft = draft && own ? draft : null;
+		// A draft of an earlier version lacks the answers that came later.
+		if (!this.draft && draft && own) this.draft = { ...draft, answers: { ...noAnswers, ...draft.answers } };
 		if (record) this.draft = null;
 		const of = record?.record.body ?? this.draft;
 		if (!of) {

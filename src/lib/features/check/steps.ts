@@ -37,7 +37,10 @@ export function isAnswered(step: StepName, answers: CheckAnswers, kept: boolean)
 		case 'measure':
 			return answers.teeth !== null && answers.outsideDiameter !== null && answers.faceWidth !== null;
 		case 'which-gear':
-			return answers.pitch !== null && answers.pressureAngle !== null && answers.form !== null;
+			return (
+				answers.severalGears ||
+				(answers.pitch !== null && answers.pressureAngle !== null && answers.form !== null)
+			);
 		case 'drive':
 			return loadAnswered(answers) && answers.speed !== null && answers.serviceFactor !== null;
 		case 'spare':

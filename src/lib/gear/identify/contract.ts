@@ -67,6 +67,8 @@ export interface Misfit {
 	/** Of a span: over how many teeth. */
 	teeth?: number | undefined;
 	residual: number;
+	/** From what this gear would give new, without shift: what shift, worn tips and thin teeth explain is in here. */
+	offNominal: number;
 	unit: 'mm';
 	sigmas: number;
 	/** The reading does not fit what the others say: look again. */
@@ -84,6 +86,9 @@ export interface Candidate {
 	form: 'full-depth' | 'stub';
 	/** In modules; the middle of what the readings leave. */
 	profileShift: number;
+	/** How much the tips and the thickness of the teeth have lost, mm: the middle of what the readings leave. */
+	tipLoss: number;
+	thicknessLoss: number;
 	/** As counted, or one more or less where the readings say so. */
 	teeth: number;
 	probability: number;

@@ -76,6 +76,8 @@ function candidateOf(
 		pressureAngle: kind.pressureAngle,
 		form: kind.form,
 		profileShift: Math.abs(evidence.shift) < 0.01 ? 0 : evidence.shift,
+		tipLoss: evidence.tip * kind.module,
+		thicknessLoss: evidence.thickness * kind.module,
 		teeth,
 		probability,
 		misfits: observations.map((observation, i): Misfit => {
@@ -88,6 +90,7 @@ function candidateOf(
 				reading: observation.reading,
 				...(observation.spanTeeth === undefined ? {} : { teeth: observation.spanTeeth }),
 				residual,
+				offNominal: observation.value - of.nominal,
 				unit: 'mm',
 				sigmas,
 				flagged: evidence.gross === i || Math.abs(sigmas) > FAR

@@ -20,6 +20,7 @@ export const common = {
 	'unit.lbf*in': ['lbf·in', 'lbf·in'],
 	'unit.N*m': ['N·m', 'N·m'],
 	'unit.rpm': ['rpm', 'rpm'],
+	'unit.deg': ['°', '°'],
 	'unit.x': ['times', 'veces'],
 	'caution.strip.lead': [
 		'A screening of tooth strength from these readings.',

@@ -19,6 +19,22 @@ export const reasons = {
 		'The margin in bending is {margin}, and {low} at the bad end of the uncertainty; the plant needs {needed}.',
 		'El margen a flexión es {margin}, y {low} en el extremo malo de la incertidumbre; la planta requiere {needed}.'
 	],
+	'reason.weakest-of-several': [
+		'{gears} gears fit the readings; the weakest of them decides. One more reading may leave fewer.',
+		'{gears} engranes coinciden con las lecturas; decide el más débil. Una lectura más puede dejar menos.'
+	],
+	'reason.no-gear-fits': [
+		'No involute gear of the known pitches makes these readings. Look again at the count and the flagged reading, or have the gear identified by the gear shop.',
+		'Ningún engrane de evolvente de los pasos conocidos da estas lecturas. Revise el conteo y la lectura señalada, o pida al taller de engranes que lo identifique.'
+	],
+	'reason.may-fit-no-gear': [
+		'The readings may be of no involute gear at all. Take one more reading, or have a second person measure.',
+		'Las lecturas podrían no ser de ningún engrane de evolvente. Tome una lectura más o pida a otra persona que mida.'
+	],
+	'reason.choice-against-readings': [
+		'The chosen gear does not fit the readings: less than one in a hundred. Measure again, or say in the note where the choice comes from.',
+		'El engrane elegido no coincide con las lecturas: menos de uno en cien. Mida otra vez o anote de dónde viene la elección.'
+	],
 	'reason.out-of-range': [
 		'These values lead to a figure too large or too small to compute with. Check the readings and their units.',
 		'Estos valores llevan a una cifra demasiado grande o pequeña para calcular. Revise las lecturas y sus unidades.'

@@ -136,9 +136,44 @@ export const tablet = {
 	'measure.on-record': ['On record: {value}', 'Registrado: {value}'],
 	'measure.on-record-date': ['{date}. Not a reading', '{date}. No es lectura'],
 	'measure.nothing-on-record': ['Nothing on record here', 'Nada registrado aquí'],
+	'measure.again': ['Measure again', 'Medir otra vez'],
+	'measure.repeats': ['last of {n}, spread {spread}', 'última de {n}, dispersión {spread}'],
+	'measure.count-blind': ['Count without looking at the first count', 'Cuente sin mirar el primer conteo'],
+	'count.differ': [
+		'{first} first, {second} now. Count once more and correct the wrong one.',
+		'Primero {first}, ahora {second}. Cuente otra vez y corrija el equivocado.'
+	],
+	'count.correct-first': ['Correct the first count', 'Corregir el primer conteo'],
+	'count.go-on': ['Go on, in doubt of one', 'Seguir, con duda de uno'],
+	'how.tip-to-gap': ['Read tip to gap', 'Leído de punta a hueco'],
+	'how.pi-tape': ['By pi tape', 'Con cinta pi'],
+	'how.tips-worn': ['Tips are worn', 'Puntas gastadas'],
+	'how.flanks-worn': ['Flanks are worn', 'Flancos gastados'],
+	'how.over-teeth': ['{n} teeth', '{n} dientes'],
+	'how.one-tooth-less': ['One tooth less', 'Un diente menos'],
+	'how.one-tooth-more': ['One tooth more', 'Un diente más'],
+	'tally.by-taps': ['Count by taps', 'Contar por toques'],
+	'tally.tap': ['Touch once for each tooth', 'Toque una vez por diente'],
+	'tally.one-back': ['One back', 'Uno atrás'],
+	'tally.from-start': ['From the start', 'Desde el inicio'],
+	'tool.label': ['Taken with: {tool}, {good}. Change it', 'Medido con: {tool}, {good}. Cambiarlo'],
+	'tool.good-to': ['good to {size} {unit}', 'hasta {size} {unit}'],
+	'tool.good-to-angle': ['good to {size}°', 'hasta {size}°'],
+	'tool.calliper': ['Calliper', 'Calibrador'],
+	'tool.long-calliper': ['Long calliper', 'Calibrador largo'],
+	'tool.calliper-tips': ['Calliper, tips or rod', 'Calibrador, puntas o varilla'],
+	'tool.micrometer': ['Micrometer', 'Micrómetro'],
+	'tool.disc-micrometer': ['Disc micrometer', 'Micrómetro de platillos'],
+	'tool.tooth-calliper': ['Gear-tooth calliper', 'Calibrador de dientes'],
+	'tool.pi-tape': ['Pi tape', 'Cinta pi'],
+	'tool.rule': ['Steel rule', 'Regla de acero'],
+	'tool.tape': ['Steel tape', 'Cinta métrica'],
+	'tool.rule-over-shafts': ['Rule over the shafts', 'Regla sobre los ejes'],
+	'tool.protractor': ['Protractor', 'Transportador'],
 	'measure.kept-here': ['kept on this tablet', 'guardada en la tableta'],
 	'measure.source.keypad': ['from the keypad', 'del teclado'],
 	'measure.source.typed': ['typed, or by calliper', 'escrito o del calibrador'],
+	'measure.source.tally': ['counted by taps', 'contado por toques'],
 	'measure.source.position': ["from the position's record", 'del registro de la posición'],
 	'measure.source.rule': ["from the plant's rule", 'de la regla de la planta'],
 	'key.erase': ['Erase', 'Borrar'],
@@ -195,6 +230,58 @@ export const tablet = {
 		'{n} is odd: this reads {low} low, allowed for',
 		'{n} es impar: lee {low} de menos, ya corregido'
 	],
+	'picture.secondCount.lead': ['Count once more', 'Cuente otra vez'],
+	'picture.secondCount.text': [
+		'From another tooth, the other way round',
+		'Desde otro diente y en sentido contrario'
+	],
+	'picture.mateTeeth.lead': ['The other gear', 'El otro engrane'],
+	'picture.mateTeeth.text': ['Mark one tooth and count round to it', 'Marque un diente y cuente la vuelta'],
+	'picture.span.lead': ['Flat on the flanks', 'Plano en los flancos'],
+	'picture.span.text': [
+		'Rock the jaws, keep the smallest reading',
+		'Mueva las puntas, guarde la lectura menor'
+	],
+	'picture.wholeDepth.lead': ['Tip to root', 'Punta a raíz'],
+	'picture.wholeDepth.text': [
+		'Depth rod down to the root, from two tips',
+		'Varilla hasta la raíz, desde dos puntas'
+	],
+	'picture.rootDiameter.lead': ['Root to root', 'Raíz a raíz'],
+	'picture.rootDiameter.text': [
+		'Narrow jaws down in two opposite spaces',
+		'Puntas finas en dos huecos opuestos'
+	],
+	'picture.chordalThickness.lead': ['Across one tooth', 'A través de un diente'],
+	'picture.chordalThickness.text': [
+		'Tongue on the tip, one addendum deep',
+		'Lengua en la punta, a un addendum'
+	],
+	'picture.pinDiameter.lead': ['One pin first', 'Primero un rodillo'],
+	'picture.pinDiameter.text': [
+		'It must rest on both flanks of a space',
+		'Debe apoyar en ambos flancos del hueco'
+	],
+	'picture.overPins.lead': ['Over both pins', 'Sobre ambos rodillos'],
+	'picture.overPins.text': [
+		'In opposite spaces; odd count: the nearest to opposite',
+		'En huecos opuestos; si es impar, los más opuestos'
+	],
+	'picture.centreDistance.lead': ['Shaft to shaft', 'Eje a eje'],
+	'picture.centreDistance.text': [
+		'Outside to outside, less half of both shafts',
+		'De fuera a fuera, menos la mitad de cada eje'
+	],
+	'picture.circularPitch.lead': ['Tooth to tooth', 'Diente a diente'],
+	'picture.circularPitch.text': [
+		'Over several teeth halfway up, divided by them',
+		'Sobre varios dientes a media altura, dividido'
+	],
+	'picture.helixAngle.lead': ['Tooth to shaft', 'Diente a eje'],
+	'picture.helixAngle.text': [
+		'Ink the tips, roll them on paper; 0 for straight',
+		'Entinte, ruede en papel; 0 si es recto'
+	],
 	'picture.faceWidth.lead': ['Across the teeth', 'A lo ancho del diente'],
 	'picture.faceWidth.text': [
 		'Along the shaft, without hub or burr',
@@ -229,6 +316,7 @@ export const tablet = {
 	],
 	'which.form.full-depth': ['most gears cut today', 'la mayoría de los actuales'],
 	'which.form.old': ['usual on old inch lines', 'usual en líneas antiguas'],
+	'which.form.rare': ['seldom met', 'poco frecuente'],
 	'which.form.stub': ['short, broad teeth', 'dientes cortos y anchos'],
 	'which.on-record': ['on record here', 'registrado aquí'],
 

@@ -95,5 +95,12 @@ export const verdict = {
 	'verdict.working': ['Working', 'Cálculo'],
 	'verdict.working-lines': ['line by line, {n} lines', 'línea por línea, {n} líneas'],
 	'verdict.hide-working': ['Hide the working', 'Ocultar el cálculo'],
-	'verdict.keep': ['Keep this check', 'Guardar esta verificación']
+	'verdict.keep': ['Keep this check', 'Guardar esta verificación'],
+	'tried.caption': [
+		'Gears that fit, and what each carries',
+		'Engranes que coinciden y lo que soporta cada uno'
+	],
+	'tried.gear': ['Gear', 'Engrane'],
+	'tried.share': ['Likely', 'Probable'],
+	'tried.decides': ['decides', 'decide']
 } as const satisfies Record<string, readonly [string, string]>;

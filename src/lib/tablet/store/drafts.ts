@@ -2,20 +2,23 @@
  * Checks that are being made. Every keystroke is put here, so that a killed tab loses nothing; a draft goes
  * only when its record is kept, in the same transaction, or when its author discards it.
  */
-import { noAnswers } from '$lib/records/check';
+import { noAnswers, type CheckAnswers } from '$lib/records/check';
 import { newId } from '$lib/records/ids';
 import type { Store } from './open';
 import type { Draft } from './schema';
 import { inTransaction } from './transaction';
 
-export type DraftStart = Pick<Draft, 'plantId' | 'authorId' | 'machineId' | 'positionId' | 'step'>;
+export type DraftStart = Pick<Draft, 'plantId' | 'authorId' | 'machineId' | 'positionId' | 'step'> & {
+	/** What is known before anything is answered. */
+	answers?: Partial<CheckAnswers>;
+};
 
 export async function startDraft(store: Store, start: DraftStart, now: Date): Promise<Draft> {
 	const at = now.toISOString();
 	const draft: Draft = {
 		...start,
 		id: newId(now.getTime()),
-		answers: structuredClone(noAnswers),
+		answers: { ...structuredClone(noAnswers), ...start.answers },
 		entry: null,
 		startedAt: at,
 		updatedAt: at

@@ -8,6 +8,7 @@ import type { CheckAnswers } from '$lib/records/check';
 import type { Envelope } from '$lib/records/envelope';
 import type { Entity, MirrorChange } from '$lib/records/mirror';
 import type { QuarantineCode, Role } from '$lib/records/protocol';
+import type { Take } from '$lib/records/reading';
 
 /** Who works here now. It outlives the server's session: the right to record offline is another thing. */
 export interface LocalPerson {
@@ -20,6 +21,17 @@ export interface LocalPerson {
 	since: string;
 }
 
+/** What stands in the number field and is no answer yet. */
+export interface Entry {
+	/** Which reading: a span carries its teeth in the name. */
+	field: string;
+	text: string;
+	unit: string;
+	source: Take['source'];
+	/** The same reading once more, beside the one that is kept. */
+	again: boolean;
+}
+
 /** A check that is not kept yet, with the text of the field that is being typed. */
 export interface Draft {
 	/** The record that is made of it takes this id, so that keeping twice keeps once. */
@@ -29,7 +41,7 @@ export interface Draft {
 	machineId: string;
 	positionId: string;
 	answers: CheckAnswers;
-	entry: { field: string; text: string; unit: string } | null;
+	entry: Entry | null;
 	step: string;
 	startedAt: string;
 	updatedAt: string;

@@ -4,11 +4,30 @@
  */
 import type { Unit } from '$lib/gear/quantity';
 import { toSI } from '$lib/gear/quantity';
-import type { CheckAnswers } from '$lib/records/check';
-import type { ReadingUnit } from '$lib/records/reading';
+import type { Instrument } from '$lib/records/instruments';
+import { isPlain, type ReadingUnit } from '$lib/records/reading';
 
-export type FieldName =
-	'teeth' | 'outsideDiameter' | 'faceWidth' | 'power' | 'torque' | 'speed' | 'serviceFactor';
+export const FIELD_NAMES = [
+	'teeth',
+	'secondCount',
+	'outsideDiameter',
+	'faceWidth',
+	'span',
+	'wholeDepth',
+	'rootDiameter',
+	'chordalThickness',
+	'overPins',
+	'pinDiameter',
+	'centreDistance',
+	'mateTeeth',
+	'circularPitch',
+	'helixAngle',
+	'power',
+	'torque',
+	'speed',
+	'serviceFactor'
+] as const;
+export type FieldName = (typeof FIELD_NAMES)[number];
 
 export interface Field {
 	name: FieldName;
@@ -20,55 +39,65 @@ export interface Field {
 	/** Smallest and largest possible, in the core's own unit (mm, W, N·m, rpm) or as counted. */
 	least: number;
 	most: number;
+	/** What it can be taken with, the usual one first. */
+	instruments: readonly Instrument[];
 }
 
-export const FIELDS: Record<FieldName, Field> = {
-	teeth: { name: 'teeth', units: ['teeth'], whole: true, fractions: false, least: 4, most: 1000 },
-	outsideDiameter: {
-		name: 'outsideDiameter',
-		units: ['in', 'mm'],
-		whole: false,
-		fractions: true,
-		least: 3,
-		most: 8000
-	},
-	faceWidth: { name: 'faceWidth', units: ['in', 'mm'], whole: false, fractions: true, least: 1, most: 2000 },
-	power: {
-		name: 'power',
-		units: ['hp', 'kW', 'W'],
-		whole: false,
-		fractions: true,
-		least: 1,
-		most: 50_000_000
-	},
-	torque: {
-		name: 'torque',
-		units: ['lbf*ft', 'lbf*in', 'N*m'],
-		whole: false,
-		fractions: false,
-		least: 0.01,
-		most: 10_000_000
-	},
-	speed: { name: 'speed', units: ['rpm'], whole: false, fractions: false, least: 0.01, most: 60_000 },
-	serviceFactor: {
-		name: 'serviceFactor',
-		units: ['x'],
-		whole: false,
-		fractions: false,
-		least: 0.5,
-		most: 5
-	}
-};
+type FieldOf<N extends FieldName> = Field & { name: N };
 
-export const MEASURED: readonly (FieldName & keyof CheckAnswers)[] = [
-	'teeth',
-	'outsideDiameter',
-	'faceWidth'
-];
+function counted<N extends FieldName>(name: N, least: number, most: number): FieldOf<N> {
+	return { name, units: ['teeth'], whole: true, fractions: false, least, most, instruments: [] };
+}
+
+function length<N extends FieldName>(
+	name: N,
+	least: number,
+	most: number,
+	instruments: readonly Instrument[]
+): FieldOf<N> {
+	return { name, units: ['in', 'mm'], whole: false, fractions: true, least, most, instruments };
+}
+
+function other<N extends FieldName>(
+	name: N,
+	units: readonly ReadingUnit[],
+	[least, most]: readonly [number, number],
+	fractions = false
+): FieldOf<N> {
+	return { name, units, whole: false, fractions, least, most, instruments: [] };
+}
+
+export const FIELDS: { [N in FieldName]: FieldOf<N> } = {
+	teeth: counted('teeth', 4, 1000),
+	secondCount: counted('secondCount', 4, 1000),
+	outsideDiameter: length('outsideDiameter', 3, 8000, [
+		'calliper',
+		'long-calliper',
+		'micrometer',
+		'pi-tape',
+		'rule',
+		'tape'
+	]),
+	faceWidth: length('faceWidth', 1, 2000, ['rule', 'calliper', 'tape']),
+	span: length('span', 1, 4000, ['calliper', 'disc-micrometer', 'long-calliper']),
+	wholeDepth: length('wholeDepth', 0.3, 300, ['calliper-tips', 'rule']),
+	rootDiameter: length('rootDiameter', 2, 8000, ['calliper-tips', 'rule']),
+	chordalThickness: length('chordalThickness', 0.2, 200, ['tooth-calliper', 'calliper-tips', 'rule']),
+	overPins: length('overPins', 3, 8000, ['calliper', 'micrometer', 'long-calliper']),
+	pinDiameter: length('pinDiameter', 0.3, 200, ['micrometer', 'calliper']),
+	centreDistance: length('centreDistance', 3, 10_000, ['rule-over-shafts', 'long-calliper', 'tape']),
+	mateTeeth: counted('mateTeeth', 4, 5000),
+	circularPitch: length('circularPitch', 0.5, 400, ['rule', 'calliper']),
+	helixAngle: { ...other('helixAngle', ['deg'], [0, 60]), instruments: ['protractor'] },
+	power: other('power', ['hp', 'kW', 'W'], [1, 50_000_000], true),
+	torque: other('torque', ['lbf*ft', 'lbf*in', 'N*m'], [0.01, 10_000_000]),
+	speed: other('speed', ['rpm'], [0.01, 60_000]),
+	serviceFactor: other('serviceFactor', ['x'], [0.5, 5])
+};
 
 /** A figure in the unit in which the limits stand. */
 export function inLimitUnit(value: number, unit: ReadingUnit): number {
-	return unit === 'teeth' || unit === 'x' ? value : toSI({ value, unit: unit satisfies Unit });
+	return isPlain(unit) ? value : toSI({ value, unit: unit satisfies Unit });
 }
 
 /** The other unit of a length or power, to stand smaller beside the reading; null where there is none. */

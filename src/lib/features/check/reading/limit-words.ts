@@ -2,7 +2,7 @@
 import type { Words } from '$lib/i18n/context.svelte';
 import { figure } from '$lib/i18n/format';
 import { fromSI } from '$lib/gear/quantity';
-import type { ReadingUnit } from '$lib/records/reading';
+import { isPlain, type ReadingUnit } from '$lib/records/reading';
 import type { Field } from './fields';
 import type { EntryProblem } from './number-entry';
 
@@ -13,7 +13,7 @@ export function limitWords(
 	{ t, language }: Words
 ): string {
 	const shown = (limit: number) =>
-		`${figure(unit === 'teeth' || unit === 'x' ? limit : fromSI(limit, unit), 3, language)} ${t(`unit.${unit}`)}`;
+		`${figure(isPlain(unit) ? limit : fromSI(limit, unit), 3, language)} ${t(`unit.${unit}`)}`;
 	return t(`entry.${problem}`, {
 		field: t(`field.${field.name}`),
 		least: shown(field.least),

@@ -45,6 +45,7 @@ const SUFFIXES: readonly [RegExp, ReadingUnit][] = [
 	[/n[·*]?m$/i, 'N*m'],
 	[/lbf?[·*-]?ft$/i, 'lbf*ft'],
 	[/lbf?[·*-]?in$/i, 'lbf*in'],
+	[/(°|deg)$/i, 'deg'],
 	[/teeth$/i, 'teeth']
 ];
 
