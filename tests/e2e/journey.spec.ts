@@ -1,6 +1,6 @@
 /** The whole way, in small: a measured gear on a tablet without a server, to the planner's page. */
 import { expect, lookAt, readyTablet, signIn, tapKeys, test } from './fixtures';
-import { doCheck } from './steps';
+import { doCheck, takeReading } from './steps';
 
 test.afterEach(async ({ server }) => {
 	// A test that stopped the server leaves it running for the next, whatever became of it.
@@ -36,8 +36,7 @@ test('a check is done with the server stopped, survives a killed page, and reach
 		teeth: '25',
 		outsideDiameter: '5.389',
 		faceWidth: '2 1/2',
-		pitch: /^DP 5\b/,
-		form: /^20° full depth/,
+		gear: /^DP 5, 20°, full depth/,
 		power: '7.5',
 		speed: '180',
 		service: /1\.25/,
@@ -161,6 +160,8 @@ test('bad input on the keypad names field and remedy and keeps what was typed', 
 	await expect(page.locator('.box input')).toHaveValue('2');
 	await tapKeys(page, '5');
 	await keep.tap();
+	// The record of this position has another count: it is taken once more.
+	await takeReading(page, 'Teeth, counted again', '25');
 
 	// A calliper types into the field wherever the focus is, and Enter keeps the reading.
 	await expect(page.getByRole('heading', { name: 'Outside diameter' })).toBeVisible();
@@ -226,6 +227,11 @@ test('the steps work by keyboard alone', async ({ page }) => {
 		await page.keyboard.type(text);
 		await page.keyboard.press('Enter');
 	}
+	await page.getByRole('button', { name: /^DP 6, 20°/ }).focus();
+	await page.keyboard.press('Enter');
+	await expect(page.getByRole('button', { name: /^DP 6, 20°/ })).toHaveAttribute('aria-pressed', 'true');
+	await page.getByRole('link', { name: 'Choose by hand' }).focus();
+	await page.keyboard.press('Enter');
 	const form = page.getByRole('radiogroup', { name: 'Pressure angle and form' });
 	await form.getByRole('radio').first().focus();
 	await page.keyboard.press('ArrowDown');

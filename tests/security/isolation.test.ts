@@ -23,7 +23,7 @@ const PLANT_TABLES: Record<string, { insert: boolean; update: string[] }> = {
 	gear_positions: { insert: false, update: [] },
 	materials: { insert: true, update: [] },
 	material_revisions: { insert: true, update: [] },
-	plant_rules: { insert: false, update: [] },
+	plant_rules: { insert: true, update: [] },
 	checks: { insert: true, update: [] },
 	quarantine: { insert: true, update: [] },
 	changes: { insert: true, update: [] },

@@ -98,6 +98,12 @@ export const KNOWN_ROUTES: Record<string, KnownRoute> = {
 			init: formInit({ ...typedFrom(testMaterial('Revised')), expectedRevision: '1' })
 		})
 	},
+	'load /(office)/rules': { who: OFFICE, status: [200] },
+	'action tools /(office)/rules': {
+		who: ['supervisor'],
+		status: [303],
+		asked: () => ({ init: formInit({ expectedRevision: '1', calliper: '0.06' }) })
+	},
 	'load /(office)/materials/new': { who: ['supervisor'], status: [200] },
 	'action default /(office)/materials/new': {
 		who: ['supervisor'],

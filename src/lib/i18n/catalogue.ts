@@ -11,6 +11,7 @@ import { identify } from './messages/identify';
 import { materials } from './messages/materials';
 import { office } from './messages/office';
 import { reasons } from './messages/reasons';
+import { rules } from './messages/rules';
 import { sync } from './messages/sync';
 import { tablet } from './messages/tablet';
 import { verdict } from './messages/verdict';
@@ -25,6 +26,7 @@ const catalogue = {
 	...materials,
 	...office,
 	...reasons,
+	...rules,
 	...sync,
 	...tablet,
 	...verdict,

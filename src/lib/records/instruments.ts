@@ -34,13 +34,17 @@ export const USUAL_UNCERTAINTY: Record<Instrument, number> = {
 	protractor: 0.5
 };
 
+/** Finer than any tool at a machine, and coarser than would tell anything; mm or degrees. */
+export const LEAST_UNCERTAINTY = 0.0001;
+export const MOST_UNCERTAINTY = 20;
+
 /** What a plant's rules say of its own tools; a tool that they leave out is as good as usual. */
 export const instrumentRules = z.partialRecord(
 	z.enum(INSTRUMENTS, `The tool must be one of: ${INSTRUMENTS.join(', ')}.`),
 	z
 		.number('The uncertainty of a tool is a number.')
-		.min(0.0001, 'The uncertainty of a tool must be at least 0.0001.')
-		.max(20, 'The uncertainty of a tool must be at most 20.')
+		.min(LEAST_UNCERTAINTY, `The uncertainty of a tool must be at least ${LEAST_UNCERTAINTY}.`)
+		.max(MOST_UNCERTAINTY, `The uncertainty of a tool must be at most ${MOST_UNCERTAINTY}.`)
 );
 export type InstrumentRules = z.infer<typeof instrumentRules>;
 

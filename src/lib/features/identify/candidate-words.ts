@@ -55,9 +55,9 @@ export function otherNames(candidate: Candidate, counted: number, words: Words):
 	].join(' · ');
 }
 
-/** Whole per cent; what is not certain never reads as if it were. */
-export function percent(probability: number): number {
-	return Math.min(99, Math.max(1, Math.round(probability * 100)));
+/** Whole per cent, "<1" below one; what is not certain never reads as if it were. */
+export function percent(probability: number): string {
+	return probability < 0.01 ? '<1' : String(Math.min(99, Math.round(probability * 100)));
 }
 
 /** How far off, in widths of the doubt, counts as lying off at all. */
@@ -95,6 +95,12 @@ function causeOf({ reading, offNominal }: Misfit, candidate: Candidate): 'tip' |
 export function readingName(reading: ReadingName, spanTeeth: number | undefined, { t }: Words): string {
 	const key: MessageKey = reading === 'spans' ? 'field.span' : `field.${reading}`;
 	return spanTeeth === undefined ? t(key) : t('field.span-over', { n: spanTeeth });
+}
+
+/** "Span over 3, then 4 teeth" where two belong together. */
+export function nextName({ what, spanTeeth, thenSpanTeeth }: NextReading, words: Words): string {
+	if (spanTeeth === undefined || thenSpanTeeth === undefined) return readingName(what, spanTeeth, words);
+	return words.t('next.two-spans', { one: spanTeeth, two: thenSpanTeeth });
 }
 
 /** What the next reading would tell apart: "tells 20° from 14.5°". */

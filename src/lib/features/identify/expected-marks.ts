@@ -1,5 +1,6 @@
 /** Where the expected values of the leading gears stand on a rule, and their labels so that none covers another. */
-import type { NextReading } from '$lib/gear/identify/contract';
+import type { Candidate, NextReading } from '$lib/gear/identify/contract';
+import { basePitch } from '$lib/gear/measure/span';
 import { fromSI, toSI } from '$lib/gear/quantity';
 import type { LengthUnit } from './candidate-words';
 
@@ -16,6 +17,19 @@ export interface ExpectedMark {
 /** More labels than this have no room beside each other. */
 const SHOWN = 3;
 const LABEL = 128;
+
+/** What the longer of two spans reads more than the shorter: the base pitch of each gear. */
+export function differences(
+	expected: NextReading['expected'],
+	candidates: readonly Candidate[]
+): NextReading['expected'] {
+	return expected.flatMap(({ candidate }) => {
+		const gear = candidates[candidate];
+		if (!gear) return [];
+		const value = basePitch(gear.module, (gear.pressureAngle * Math.PI) / 180);
+		return [{ candidate, value, unit: 'mm' as const }];
+	});
+}
 
 /** Of the likeliest gears, in the order of their values. */
 export function expectedMarks(

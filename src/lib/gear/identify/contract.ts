@@ -99,6 +99,8 @@ export interface NextReading {
 	what: ReadingName;
 	/** Over how many teeth, of a span. */
 	spanTeeth?: number | undefined;
+	/** Of two spans that tell by their difference: over how many the second is to be taken. */
+	thenSpanTeeth?: number | undefined;
 	why: string;
 	/** What each leading candidate would show. */
 	expected: { candidate: number; value: number; unit: LengthUnit }[];
@@ -106,7 +108,7 @@ export interface NextReading {
 
 export interface IdentifyAnswer {
 	core: string;
-	/** Likeliest first, down to one in a thousand. */
+	/** Likeliest first, down to one in a thousand, and three at least. */
 	candidates: Candidate[];
 	/** Probability that no involute gear of the candidate set made these readings. */
 	noneFits: number;

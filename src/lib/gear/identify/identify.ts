@@ -13,6 +13,9 @@ import { predict } from './prediction';
 /** Told from here up; one in a thousand is still shown, less is noise. */
 const LEAST_TOLD = 0.001;
 
+/** Where no gear fits, the least bad ones tell which reading to look at again. */
+const ALWAYS_TOLD = 3;
+
 /** Where hardly anything was measured, hundreds are possible. */
 const MOST_TOLD = 40;
 
@@ -28,7 +31,9 @@ export function identify(input: IdentifyInput): IdentifyAnswer {
 	const { weighed, noneFits } = posteriorOf(input, observations);
 	const groups = grouped(weighed);
 	const candidates = groups.map(({ best, probability }) => candidateOf(best, probability, observations));
-	const told = candidates.filter(({ probability }) => probability >= LEAST_TOLD).slice(0, MOST_TOLD);
+	const told = candidates
+		.filter(({ probability }, i) => probability >= LEAST_TOLD || i < ALWAYS_TOLD)
+		.slice(0, MOST_TOLD);
 	const places = new Map(groups.map(({ key }, place) => [key, place]));
 	const place = (one: Weighed) => {
 		const found = places.get(keyOf(one));

@@ -78,12 +78,13 @@ export function nextReadingOf(
 	}
 	if (!best) return null;
 	const { name, readings } = best;
-	const [reading] = readings;
+	const [reading, then] = readings;
 	if (!reading) return null;
 	const unit = input.outsideDiameter?.unit === 'in' || input.prior === 'inch' ? 'in' : 'mm';
 	return {
 		what: name,
 		...(reading.spanTeeth === undefined ? {} : { spanTeeth: reading.spanTeeth }),
+		...(then?.spanTeeth === undefined ? {} : { thenSpanTeeth: then.spanTeeth }),
 		why: WHY[name],
 		expected: expectedOf(reading, input, leading, place).map(({ candidate, value }) => ({
 			candidate,

@@ -11,7 +11,6 @@ export const identify = {
 		'Las lecturas aún no dicen su tamaño. Mida los dientes y el diámetro exterior, o elíjalo a mano según el plano o el sello.'
 	],
 	'gears.none-of-these': ['No involute gear fits', 'Ningún engrane coincide'],
-	'gears.below-one': ['Below 1 %', 'Menos de 1 %'],
 	'gears.true-scale': ['True scale', 'Tamaño real'],
 	'gears.by-hand': ['Choose by hand', 'Elegir a mano'],
 	'gears.go-on': ['Go on: the weakest of the {n} decides', 'Seguir: decide el más débil de los {n}'],
@@ -47,8 +46,9 @@ export const identify = {
 
 	'next.best': ['Next best reading', 'La mejor lectura siguiente'],
 	'next.tells': ['Next best reading: tells {a} from {b}', 'Mejor lectura: separa {a} de {b}'],
-	'next.expected': ['What each of these gears would show', 'Lo que mostraría cada engrane'],
-	'next.in-unit': ['in {unit}', 'en {unit}'],
+	'next.expected': ['It would read ({unit})', 'Leería ({unit})'],
+	'next.expected-difference': ['The second less the first ({unit})', 'La segunda menos la primera ({unit})'],
+	'next.two-spans': ['Span over {one}, then {two} teeth', 'Sobre {one} y luego {two} dientes'],
 	'next.measure': ['Measure it', 'Medirla'],
 	'next.measure-first': ['Measure', 'Medir'],
 	'next.measure-again': ['Measure it again', 'Medir otra vez'],

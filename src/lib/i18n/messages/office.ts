@@ -5,6 +5,7 @@ export const office = {
 	'office.tab.machines': ['Machines', 'Máquinas'],
 	'office.tab.checks': ['Checks', 'Verificaciones'],
 	'office.tab.materials': ['Materials', 'Materiales'],
+	'office.tab.rules': ['Rules', 'Reglas'],
 	'office.your-plants': ['Plant: {plant}. Work at another', 'Planta: {plant}. Trabajar en otra'],
 	'office.work-at': ['{plant}, {role}', '{plant}, {role}'],
 	'office.home': ['Cogmark: machines', 'Cogmark: máquinas'],
