@@ -79,8 +79,10 @@ test('the tablet, every step', async ({ page }) => {
 		'look',
 		'measure?reading=teeth',
 		'measure?reading=outsideDiameter',
-		'measure?reading=faceWidth',
+		'measure?reading=span-3',
+		'measure?reading=wholeDepth',
 		'which-gear',
+		'which-gear?reading=by-hand',
 		'drive?reading=load',
 		'drive?reading=speed',
 		'drive?reading=service',
@@ -119,6 +121,7 @@ test('the office, every page', async ({ page, sql }) => {
 		['checks', '/checks'],
 		['check', `/checks/${check!.id}`],
 		['materials', '/materials'],
+		['rules', '/rules'],
 		['material', `/materials/${material!.id}`],
 		['missing', '/machines/01900000-0000-7000-8000-000000000000']
 	] as const) {
