@@ -43,6 +43,15 @@ export function gearName({ pitch, pressureAngle, form, profileShift }: NamedGear
 	].join(', ');
 }
 
+/** "DP 5, 20°": where there is little room; what is not full depth says so. */
+export function shortGearName(
+	{ pitch: { system, value }, pressureAngle, form }: Omit<NamedGear, 'profileShift'>,
+	{ t, language }: Words
+): string {
+	const pitch = t(`gear.short.${system}`, { value: figure(value, 4, language) });
+	return `${pitch}, ${pressureAngle}°${form === 'stub' ? ` ${t('gear.form.stub')}` : ''}`;
+}
+
 export function gearWords(gear: KnownGear, words: Words): string {
 	const { t, language } = words;
 	const { faceWidth } = gear;

@@ -14,7 +14,7 @@ import { fromSI } from '$lib/gear/quantity';
 import type { MessageKey } from '$lib/i18n/catalogue';
 import type { Words } from '$lib/i18n/context.svelte';
 import { figure, fixed } from '$lib/i18n/format';
-import { gearName, isShifted, pitchWords } from '$lib/i18n/gear-words';
+import { gearName, isShifted, pitchWords, shortGearName } from '$lib/i18n/gear-words';
 import type { ChosenPitch } from '$lib/records/mirror';
 
 export type LengthUnit = 'in' | 'mm';
@@ -26,10 +26,7 @@ export function candidateName(candidate: Candidate, words: Words): string {
 
 /** "DP 5, 20°": where there is little room. */
 export function shortName(candidate: Candidate, words: Words): string {
-	const { t, language } = words;
-	const { system, value, pressureAngle, form } = candidate;
-	const pitch = t(`gears.short.${system}`, { value: figure(value, 4, language) });
-	return `${pitch}, ${pressureAngle}°${form === 'stub' ? ` ${t('gear.form.stub')}` : ''}`;
+	return shortGearName({ ...candidate, pitch: pitchOf(candidate) as ChosenPitch }, words);
 }
 
 /** The same pitch by its other names: "module 5.08 · circular pitch 0.628 in". */

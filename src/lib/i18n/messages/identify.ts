@@ -20,9 +20,6 @@ export const identify = {
 	'gears.more': ['{n} more, {percent} % together', '{n} más, {percent} % en total'],
 	'gears.fewer': ['The likeliest only', 'Solo los más probables'],
 	'gears.other-count': ['{teeth} teeth, counted {counted}', '{teeth} dientes, contados {counted}'],
-	'gears.short.diametral': ['DP {value}', 'DP {value}'],
-	'gears.short.module': ['mod {value}', 'mód {value}'],
-	'gears.short.circular': ['CP {value}', 'PC {value}'],
 	'gears.clear-lead': ['The readings tell it', 'Las lecturas lo dicen'],
 	'gears.clear-text': [
 		'A drawing, a stamp or the mate still goes before the readings.',

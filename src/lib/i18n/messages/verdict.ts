@@ -100,6 +100,10 @@ export const verdict = {
 		'Gears that fit, and what each carries',
 		'Engranes que coinciden y lo que soporta cada uno'
 	],
+	'tried.decides-of': [
+		'The weakest of {n} gears decides: {name}',
+		'Decide el más débil de {n} engranes: {name}'
+	],
 	'tried.gear': ['Gear', 'Engrane'],
 	'tried.share': ['Likely', 'Probable'],
 	'tried.decides': ['decides', 'decide']
