@@ -88,7 +88,11 @@ function candidateOf(
 		misfits: observations.map((observation, i): Misfit => {
 			const of = predict(observation, hypothesis);
 			const expected =
-				of.nominal + of.shift * evidence.shift + of.tip * evidence.tip + of.thickness * evidence.thickness;
+				of.nominal +
+				of.shift * evidence.shift +
+				of.tip * evidence.tip +
+				of.thickness * evidence.thickness +
+				of.helix * evidence.helix;
 			const residual = observation.value - expected;
 			const sigmas = residual / Math.hypot(observation.sigma, of.own);
 			return {

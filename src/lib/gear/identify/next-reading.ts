@@ -160,13 +160,19 @@ function showing(
 	{ hypothesis, evidence }: Weighed
 ): { middle: number; width: number } {
 	const of = predict(reading, hypothesis);
-	const { shift, thickness } = nuisancesOf(input, hypothesis.teeth);
+	const { shift, thickness, helix } = nuisancesOf(input, hypothesis.teeth);
 	const middle =
-		of.nominal + of.shift * evidence.shift + of.tip * evidence.tip + of.thickness * evidence.thickness;
-	// Once a diameter is known the shift is known to a few hundredths; the thickness only once a span is.
+		of.nominal +
+		of.shift * evidence.shift +
+		of.tip * evidence.tip +
+		of.thickness * evidence.thickness +
+		of.helix * evidence.helix;
+	// Once a diameter is known the shift is known to a few hundredths and the helix to a fifth of its doubt; the
+	// thickness only once a span is.
 	const unseen = Math.hypot(
 		of.shift * (input.outsideDiameter ? 0.02 : whole(shift).spread),
-		of.thickness * ((input.spans ?? []).length > 0 ? 0.01 : whole(thickness).spread)
+		of.thickness * ((input.spans ?? []).length > 0 ? 0.01 : whole(thickness).spread),
+		of.helix * (input.outsideDiameter ? 0.2 : 1) * helix
 	);
 	return { middle, width: Math.hypot(reading.sigma, of.own, unseen) };
 }

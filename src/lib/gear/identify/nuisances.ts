@@ -4,6 +4,7 @@
  * a worn one anywhere below; teeth are cut 0.01 to 0.06 thin for backlash, and wear takes more.
  */
 import type { IdentifyInput } from './contract';
+import { helixOf } from './helix';
 
 export interface Part {
 	weight: number;
@@ -15,6 +16,8 @@ export interface Nuisances {
 	shift: readonly Part[];
 	tip: readonly Part[];
 	thickness: readonly Part[];
+	/** Standard uncertainty of the helix as it was read, radians; no mixture, since a protractor is off to both sides. */
+	helix: number;
 }
 
 /** Of a number of teeth: few are enlarged more often, to keep their roots. */
@@ -53,7 +56,8 @@ export function nuisancesOf(input: IdentifyInput, teeth: number): Nuisances {
 	return {
 		shift: shiftParts(teeth),
 		tip: input.outsideDiameter?.tipWorn ? WORN_TIP : SOUND_TIP,
-		thickness: input.flanksWorn ? WORN_FLANK : SOUND_FLANK
+		thickness: input.flanksWorn ? WORN_FLANK : SOUND_FLANK,
+		helix: helixOf(input).spread
 	};
 }
 

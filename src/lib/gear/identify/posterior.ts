@@ -2,13 +2,15 @@
  * The probability of each hypothesis: every gear of the set, the tooth count as counted and one off, and both kinds of
  * dedendum. A first look in wide steps leaves those that could matter; they are worked out exactly.
  */
-import { kindsFor, type Kind } from './candidates';
 import type { IdentifyInput } from './contract';
 import { evidenceOf, type Evidence } from './evidence';
-import { NONE_FITS_PRIOR, noneFitsEvidence, sizeOf } from './none-fits';
+import { helixOf } from './helix';
+import { hypothesesOf, openIn, plausibleKinds, type Hypothesised } from './hypotheses';
+import { NONE_FITS_PRIOR, noneFitsEvidence } from './none-fits';
 import { nuisancesOf, whole, type Nuisances } from './nuisances';
 import type { Observation } from './observations';
-import { predict, type Hypothesis, type Prediction } from './prediction';
+import type { Hypothesis, Prediction } from './hypothesis';
+import { predict } from './prediction';
 
 export interface Weighed {
 	hypothesis: Hypothesis;
@@ -24,40 +26,12 @@ export interface Posterior {
 	noneFits: number;
 }
 
-/** A count is one off now and then, even where it was counted twice; in doubt far more often. From memory. */
-const COUNTS = {
-	certain: [
-		[0, 0.994],
-		[-1, 0.003],
-		[1, 0.003]
-	],
-	doubted: [
-		[0, 0.8],
-		[-1, 0.1],
-		[1, 0.1]
-	]
-} as const;
-
-/** Full depth is met with both; the older inch teeth with the shallower one. */
-function dedenda({ form, system, pressureAngle }: Kind): [dedendum: number, share: number][] {
-	if (form === 'stub') return [[1, 1]];
-	const older = pressureAngle < 19 ? 0.95 : system === 'module' ? 0.04 : 0.5;
-	return [
-		[1 + Math.PI / 20, older],
-		[1.25, 1 - older]
-	];
-}
-
 /** Beyond this, in natural logarithms, a hypothesis cannot come back; the looks themselves are rougher than that. */
 const FAR_AT_A_GLANCE = 22;
 const FAR_AT_A_LOOK = 11;
 
 export function posteriorOf(input: IdentifyInput, observations: readonly Observation[]): Posterior {
 	const mateTeeth = input.mateTeeth ?? null;
-	const possible = hypothesesOf(input, observations).map(({ hypothesis, logPrior }) => {
-		const predictions = observations.map((one) => predict(one, hypothesis));
-		return { hypothesis, logPrior, predictions, look: logPrior + glance(observations, predictions) };
-	});
 	const nuisances = new Map<number, { full: Nuisances; rough: Nuisances }>();
 	const nuisancesAt = (teeth: number) => {
 		const known = nuisances.get(teeth);
@@ -67,115 +41,88 @@ export function posteriorOf(input: IdentifyInput, observations: readonly Observa
 		nuisances.set(teeth, made);
 		return made;
 	};
-	const glanced = nearest(possible, FAR_AT_A_GLANCE);
-	for (const one of glanced) {
-		const { rough } = nuisancesAt(one.hypothesis.teeth);
-		one.look = one.logPrior + evidenceOf(observations, one.predictions, rough).log;
-	}
-	const weighed = nearest(glanced, FAR_AT_A_LOOK).map(({ hypothesis, logPrior, predictions }) => {
-		const evidence = evidenceOf(observations, predictions, nuisancesAt(hypothesis.teeth).full);
-		return { hypothesis, evidence, log: logPrior + evidence.log, probability: 0 };
-	});
+	const weighed = likely(input, observations, (teeth) => nuisancesAt(teeth).rough).map(
+		({ hypothesis, logPrior }): Weighed => {
+			const { full } = nuisancesAt(hypothesis.teeth);
+			const evidence = evidenceOf(observations, predictionsOf(observations, hypothesis), full);
+			return { hypothesis, evidence, log: logPrior + evidence.log, probability: 0 };
+		}
+	);
 	const none = Math.log(NONE_FITS_PRIOR) + noneFitsEvidence(observations, input.teeth, mateTeeth);
-	const highest = Math.max(none, ...weighed.map(({ log }) => log));
-	const all = Math.exp(none - highest) + weighed.reduce((sum, { log }) => sum + Math.exp(log - highest), 0);
-	for (const one of weighed) one.probability = Math.exp(one.log - highest) / all;
+	const most = highest([none, ...weighed.map(({ log }) => log)]);
+	const all = Math.exp(none - most) + weighed.reduce((sum, { log }) => sum + Math.exp(log - most), 0);
+	for (const one of weighed) one.probability = Math.exp(one.log - most) / all;
 	weighed.sort((a, b) => b.probability - a.probability);
-	return { weighed, noneFits: Math.exp(none - highest) / all };
+	return { weighed, noneFits: Math.exp(none - most) / all };
 }
 
-function nearest<T extends { look: number }>(of: readonly T[], far: number): T[] {
-	const best = of.reduce((most, { look }) => Math.max(most, look), -Infinity);
-	return of.filter(({ look }) => look > best - far);
-}
-
-function hypothesesOf(
+/**
+ * Those that two looks leave. Between the looks only kinds are kept, which are there anyway: a thousand hypotheses and
+ * predictions alive at once outlive the engine's young generation, and an engine that has learned this puts all later
+ * ones among the old, where collecting them makes an answer three times as slow.
+ */
+function likely(
 	input: IdentifyInput,
-	observations: readonly Observation[]
-): { hypothesis: Hypothesis; logPrior: number }[] {
-	const helixAngle = helixOf(input);
-	const counts = input.teethCertain === false ? COUNTS.doubted : COUNTS.certain;
-	const takings = takingsOf(input);
-	const given = Math.log(1 - NONE_FITS_PRIOR);
-	const depthIsSeen =
-		takings.length > 1 ||
-		observations.some(({ reading }) => reading === 'rootDiameter' || reading === 'wholeDepth');
-	return plausible(kindsFor(input.prior ?? 'either'), input, observations).flatMap((kind) =>
-		counts.flatMap(([off, share]) =>
-			(depthIsSeen ? dedenda(kind) : dedenda(kind).slice(-1).map(sure)).flatMap(([dedendum, often]) =>
-				takings.map(([taken, way]) => ({
-					hypothesis: {
-						kind,
-						teeth: input.teeth + off,
-						helixAngle,
-						mateTeeth: input.mateTeeth ?? null,
-						dedendum,
-						taken
-					},
-					logPrior: given + kind.logPrior + Math.log(share * often * way)
-				}))
-			)
+	observations: readonly Observation[],
+	roughAt: (teeth: number) => Nuisances
+): Hypothesised[] {
+	const open = openIn(input, observations);
+	const kinds = plausibleKinds(input, observations);
+	const helixSpread = helixOf(input).spread;
+	const glances = kinds.map((kind) =>
+		hypothesesOf(kind, open).reduce(
+			(most, one) => Math.max(most, glance(observations, one, helixSpread)),
+			-Infinity
 		)
 	);
-}
-
-/** Beyond this factor to either side no reading of a gear is of another module's size, were it shifted, worn or stub. */
-const SAME_SIZE = Math.log(1.8);
-
-/** Kinds whose size fits the readings, all but one of them: that one may be grossly wrong. */
-function plausible(
-	kinds: readonly Kind[],
-	{ teeth, mateTeeth }: IdentifyInput,
-	observations: readonly Observation[]
-): readonly Kind[] {
-	const sizes = observations.map((one) =>
-		Math.log(Math.abs(one.value) / sizeOf(one, teeth, mateTeeth ?? null))
-	);
-	const needed = Math.max(Math.min(1, sizes.length), sizes.length - 1);
-	return kinds.filter(({ module }) => {
-		const size = Math.log(module);
-		return sizes.filter((one) => Math.abs(one - size) < SAME_SIZE).length >= needed;
+	const least = highest(glances) - FAR_AT_A_GLANCE;
+	const looked: { one: Hypothesised; look: number }[] = [];
+	let best = -Infinity;
+	kinds.forEach((kind, place) => {
+		if ((glances[place] as number) <= least) return;
+		for (const one of hypothesesOf(kind, open)) {
+			if (glance(observations, one, helixSpread) <= least) continue;
+			const { hypothesis, logPrior } = one;
+			const predictions = predictionsOf(observations, hypothesis);
+			const look = logPrior + evidenceOf(observations, predictions, roughAt(hypothesis.teeth)).log;
+			if (look <= best - FAR_AT_A_LOOK) continue;
+			best = Math.max(best, look);
+			looked.push({ one, look });
+		}
 	});
+	return looked.filter(({ look }) => look > best - FAR_AT_A_LOOK).map(({ one }) => one);
 }
 
-/** Where no reading sees the root, one dedendum stands for both. */
-function sure([dedendum]: [number, number]): [number, number] {
-	return [dedendum, 1];
+function highest(of: readonly number[]): number {
+	return of.reduce((most, one) => Math.max(most, one), -Infinity);
 }
 
-/** "Tip to gap" is taken with a flat jaw over two tips, or with its point at the bottom: the readings tell which. */
-function takingsOf({ outsideDiameter }: IdentifyInput): [Hypothesis['taken'], number][] {
-	const taken = outsideDiameter?.taken ?? 'over-tips';
-	if (taken !== 'tip-to-gap') return [[taken, 1]];
-	return [
-		['tip-to-gap', 0.5],
-		['tip-to-bottom', 0.5]
-	];
-}
-
-/** A helix is there when its reading says so by more than its doubt. */
-function helixOf({ helixAngle }: IdentifyInput): number {
-	if (!helixAngle || Math.abs(helixAngle.value) <= 2 * (helixAngle.uncertainty ?? 1)) return 0;
-	return (Math.abs(helixAngle.value) * Math.PI) / 180;
+function predictionsOf(observations: readonly Observation[], hypothesis: Hypothesis): Prediction[] {
+	return observations.map((one) => predict(one, hypothesis));
 }
 
 /** Widths of all that is unseen, in modules, for a glance: nearly every gear is within three of them. */
 const WIDE = { shift: 0.2, tip: 0.1, thickness: 0.08 };
 
 /** Each reading by itself, with all that is unseen as one wide doubt, and no worse than a gross error. */
-function glance(observations: readonly Observation[], predictions: readonly Prediction[]): number {
-	let log = 0;
-	for (let i = 0; i < observations.length; i++) {
-		const { value, sigma } = observations[i] as Observation;
-		const of = predictions[i] as Prediction;
+function glance(
+	observations: readonly Observation[],
+	{ hypothesis, logPrior }: Hypothesised,
+	helixSpread: number
+): number {
+	let log = logPrior;
+	for (const observation of observations) {
+		const { value, sigma } = observation;
+		const of = predict(observation, hypothesis);
 		const width2 =
 			sigma * sigma +
 			of.own * of.own +
 			(of.shift * WIDE.shift) ** 2 +
 			(of.tip * WIDE.tip) ** 2 +
-			(of.thickness * WIDE.thickness) ** 2;
+			(of.thickness * WIDE.thickness) ** 2 +
+			(of.helix * helixSpread) ** 2;
 		const away = value - of.nominal;
-		const fits = -(away * away) / (2 * width2) - Math.log(width2) / 2;
+		const fits = -(away * away) / (2 * width2) - Math.log(width2) / 2 + of.logChance;
 		log += Math.max(fits, Math.log(0.01 / Math.abs(value)));
 	}
 	return log;

@@ -1,35 +1,12 @@
 /**
- * What a gear of a kind would show in each reading, as a line in three things that nobody sees: its profile shift, what
- * its tips have lost and what its teeth have lost in thickness, all in modules. Lengths in mm, angles in radians.
+ * What a gear of a kind would show in each reading, as a line in what nobody sees: its profile shift, what its
+ * tips have lost and what its teeth have lost in thickness, all in modules, and how far its helix stands off from what
+ * was read. Lengths in mm, angles in radians.
  */
-import { involute } from '../involute';
 import { overPins } from '../measure/over-pins';
-import { basePitch } from '../measure/span';
-import type { Kind } from './candidates';
-import type { OutsideDiameterReading } from './contract';
+import type { Hypothesis, Prediction } from './hypothesis';
 import type { Observation } from './observations';
-
-/** A gear of a kind with a tooth count, seen at a helix angle. */
-export interface Hypothesis {
-	kind: Kind;
-	teeth: number;
-	/** Radians. */
-	helixAngle: number;
-	mateTeeth: number | null;
-	/** In modules: of the two that full depth is met with. */
-	dedendum: number;
-	taken: NonNullable<OutsideDiameterReading['taken']> | 'tip-to-bottom';
-}
-
-/** Value at nominal, and what a module of shift, tip loss and thickness loss would add, mm. */
-export interface Prediction {
-	nominal: number;
-	shift: number;
-	tip: number;
-	thickness: number;
-	/** How far gears of this kind differ from each other in this reading, mm. */
-	own: number;
-}
+import { spanPrediction } from './span-prediction';
 
 export function predict(observation: Observation, hypothesis: Hypothesis): Prediction {
 	const { kind, teeth, helixAngle, mateTeeth, dedendum } = hypothesis;
@@ -39,25 +16,34 @@ export function predict(observation: Observation, hypothesis: Hypothesis): Predi
 	const cosine = Math.cos(helixAngle);
 	/** Pitch diameter in normal modules. */
 	const across = teeth / cosine;
+	/** What a radian of helix adds to it: the slope of 1 / cos β. */
+	const widening = across * Math.tan(helixAngle);
 	const machined = 0.004 * m;
 	switch (observation.reading) {
 		case 'outsideDiameter':
-			return outsideDiameter(hypothesis, { m, addendum, across });
+			return outsideDiameter(hypothesis, { m, addendum, across, widening });
 		case 'wholeDepth':
-			return { nominal: m * (addendum + dedendum), shift: 0, tip: -m, thickness: 0, own: 0.02 * m };
-		case 'rootDiameter':
-			return { nominal: m * (across - 2 * dedendum), shift: 2 * m, tip: 0, thickness: 0, own: 0.03 * m };
-		case 'spans': {
-			const transverse = Math.atan(Math.tan(angle) / cosine);
-			const k = observation.spanTeeth ?? 2;
 			return {
-				nominal: basePitch(m, angle) * (k - 0.5) + m * Math.cos(angle) * teeth * involute(transverse),
-				shift: 2 * m * Math.sin(angle),
-				tip: 0,
-				thickness: -m * Math.cos(angle),
-				own: machined
+				nominal: m * (addendum + dedendum),
+				shift: 0,
+				tip: -m,
+				thickness: 0,
+				helix: 0,
+				logChance: 0,
+				own: 0.02 * m
 			};
-		}
+		case 'rootDiameter':
+			return {
+				nominal: m * (across - 2 * dedendum),
+				shift: 2 * m,
+				tip: 0,
+				thickness: 0,
+				helix: m * widening,
+				logChance: 0,
+				own: 0.03 * m
+			};
+		case 'spans':
+			return spanPrediction(observation.spanTeeth ?? 2, hypothesis);
 		case 'overPins': {
 			const pin = observation.pin ?? 0;
 			const at = (thickness: number) =>
@@ -69,6 +55,8 @@ export function predict(observation: Observation, hypothesis: Hypothesis): Predi
 				shift: 2 * Math.tan(angle) * perModule,
 				tip: 0,
 				thickness: -perModule,
+				helix: 0,
+				logChance: 0,
 				own: machined
 			};
 		}
@@ -78,6 +66,9 @@ export function predict(observation: Observation, hypothesis: Hypothesis): Predi
 				shift: 2 * m * Math.tan(angle),
 				tip: 0,
 				thickness: -m,
+				// The arc is the same at any helix, and chord and arc hardly differ.
+				helix: 0,
+				logChance: 0,
 				own: machined
 			};
 		case 'centreDistance':
@@ -86,11 +77,21 @@ export function predict(observation: Observation, hypothesis: Hypothesis): Predi
 				shift: 0.5 * m,
 				tip: 0,
 				thickness: 0,
+				helix: (m * widening * (1 + (mateTeeth ?? 0) / teeth)) / 2,
+				logChance: 0,
 				// The mate's own shift, and bearings that have worn.
 				own: 0.06 * m
 			};
 		case 'circularPitch':
-			return { nominal: (Math.PI * m) / cosine, shift: 0, tip: 0, thickness: 0, own: machined };
+			return {
+				nominal: (Math.PI * m) / cosine,
+				shift: 0,
+				tip: 0,
+				thickness: 0,
+				helix: (Math.PI * m * widening) / teeth,
+				logChance: 0,
+				own: machined
+			};
 	}
 }
 
@@ -98,16 +99,20 @@ interface Size {
 	m: number;
 	addendum: number;
 	across: number;
+	widening: number;
 }
 
 /**
  * Over two tips of an odd count a chord is read; with a flat jaw over the two tips opposite, its height; and with a
  * point in the gap opposite, down to the bottom.
  */
-function outsideDiameter({ teeth, dedendum, taken }: Hypothesis, { m, addendum, across }: Size): Prediction {
+function outsideDiameter(
+	{ teeth, dedendum, taken }: Hypothesis,
+	{ m, addendum, across, widening }: Size
+): Prediction {
 	if (taken === 'tip-to-bottom') {
 		const nominal = m * (across + addendum - dedendum);
-		return { nominal, shift: 2 * m, tip: -m, thickness: 0, own: 0.02 * m };
+		return { nominal, shift: 2 * m, tip: -m, thickness: 0, helix: m * widening, logChance: 0, own: 0.02 * m };
 	}
 	const odd = teeth % 2 === 1;
 	const chord = Math.cos(Math.PI / (2 * teeth));
@@ -117,6 +122,8 @@ function outsideDiameter({ teeth, dedendum, taken }: Hypothesis, { m, addendum, 
 		shift: 2 * m * share,
 		tip: -2 * m * share,
 		thickness: 0,
+		helix: share * m * widening,
+		logChance: 0,
 		own: 0.004 * m
 	};
 }
