@@ -30,7 +30,7 @@ export const ROOMS: Room[] = [
 		name: 'features',
 		at: 'lib/features/',
 		rooms: ['ui', 'records', 'gear', 'tablet', 'i18n'],
-		packages: ['svelte', 'zod', '$app']
+		packages: ['svelte', 'zod', '@cantoo/pdf-lib', '$app']
 	},
 	{
 		name: 'server',

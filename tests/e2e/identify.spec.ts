@@ -43,6 +43,12 @@ test('the next best readings tell the gear, and its list re-orders as they come 
 		await expect(page.getByText(basePitch.toFixed(3), { exact: true })).toBeVisible();
 	}
 
+	// The leading gears at their true size, and back to where one was.
+	await page.getByRole('link', { name: 'True scale' }).tap();
+	await page.getByRole('button', { name: 'It matches' }).tap();
+	await expect(page.getByText('DP 5, 14.5°, full depth').first()).toBeVisible();
+	await page.getByRole('link', { name: 'Back to the gears' }).tap();
+
 	// Spans of a 14.5 degree gear, cut a little thin: the list turns over.
 	await page.getByRole('link', { name: 'Measure it' }).tap();
 	await takeReading(page, 'Span over 3 teeth', '1.549');

@@ -12,6 +12,7 @@ import { materials } from './messages/materials';
 import { office } from './messages/office';
 import { reasons } from './messages/reasons';
 import { rules } from './messages/rules';
+import { strip } from './messages/strip';
 import { sync } from './messages/sync';
 import { tablet } from './messages/tablet';
 import { verdict } from './messages/verdict';
@@ -27,6 +28,7 @@ const catalogue = {
 	...office,
 	...reasons,
 	...rules,
+	...strip,
 	...sync,
 	...tablet,
 	...verdict,
