@@ -48,8 +48,8 @@ function toolOutline({ addendum, dedendum, tipRadius, pressureAngle, profileShif
 	return outline;
 }
 
-/** Half thickness angle at each level from root to tip, and whether the tool's tip cut it. */
-function sweep(cut: Cut) {
+/** Half thickness angle at each level from root to tip, and whether the tool's tip cut it; the rack rolls in from `reach`. */
+function sweep(cut: Cut, reach = 5) {
 	const { teeth, addendum, dedendum, profileShift, tipWear } = cut;
 	const radius = teeth / 2;
 	const root = radius - dedendum + profileShift;
@@ -59,7 +59,7 @@ function sweep(cut: Cut) {
 	const byTip = new Uint8Array(LEVELS + 1);
 	const outline = toolOutline(cut);
 	for (let roll = 0; roll <= ROLLS; roll++) {
-		const moved = -5 + (9 * roll) / ROLLS;
+		const moved = -reach + ((reach + 4) * roll) / ROLLS;
 		let last: { radius: number; angle: number } | null = null;
 		for (const { x, y, tip: onTip } of outline) {
 			const at = {
@@ -106,4 +106,13 @@ export function bruteForceFormFactor(cut: Cut): number {
 		if (byTip[i] && y < vertex && Number.isFinite(x)) least = Math.min(least, (x * x) / (vertex - y));
 	}
 	return (2 / 3) * least;
+}
+
+/** What the swept tooth shows to be wrong with it, if anything: flanks that meet, or none left at the pitch circle. */
+export function sweptFault(cut: Cut): 'pointed' | 'no-flank-at-pitch-circle' | null {
+	// A rack that is shifted far inwards touches early.
+	const { level, angles, byTip } = sweep(cut, 10);
+	const atPitch = angles.findIndex((_, i) => level(i) >= cut.teeth / 2);
+	if (byTip[atPitch]) return 'no-flank-at-pitch-circle';
+	return (angles[LEVELS] ?? NaN) <= 0 ? 'pointed' : null;
 }

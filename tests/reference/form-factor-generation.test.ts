@@ -3,7 +3,7 @@ import { expect, test } from 'vitest';
 import { lewisFormFactorByGeometry } from '$lib/gear/form-factor-geometry';
 import { largestTipRadius } from '$lib/gear/rack';
 import { generateTooth } from '$lib/gear/tooth';
-import { bruteForceFormFactor, type Cut } from './brute-force-generation';
+import { bruteForceFormFactor, sweptFault, type Cut } from './brute-force-generation';
 
 /** The same gears in every run. */
 function numbers(seed: number): (from: number, to: number) => number {
@@ -34,17 +34,29 @@ function randomCut(between: ReturnType<typeof numbers>): Cut {
 
 const shapeOf = ({ teeth, profileShift, tipWear, ...rack }: Cut) => ({ teeth, profileShift, tipWear, rack });
 
-function cuts(count: number): Cut[] {
-	const between = numbers(2026);
-	const found: Cut[] = [];
-	while (found.length < count) {
-		const cut = randomCut(between);
-		if (!('code' in generateTooth(shapeOf(cut)))) found.push(cut);
-	}
-	return found;
-}
+// None of these gears is left out: each has flanks, so a refusal of one would be wrong.
+const between = numbers(2026);
+const gears = Array.from({ length: 200 }, () => randomCut(between));
 
-const gears = cuts(200);
+const CODES = { pointed: 'tooth-pointed', 'no-flank-at-pitch-circle': 'undercut-too-deep' };
+
+test('just those are refused whose swept tooth has no flank or no land', { timeout: 120_000 }, () => {
+	const plain = { addendum: 1, dedendum: 1.25, tipRadius: 0.25, tipWear: 0 };
+	const said: string[] = [];
+	for (const teeth of [8, 10, 12, 17, 25]) {
+		for (const degrees of [14.5, 20, 25]) {
+			for (const profileShift of [-0.7, -0.25, 0.3, 0.85]) {
+				const cut = { ...plain, teeth, pressureAngle: (degrees * Math.PI) / 180, profileShift };
+				const tooth = generateTooth(shapeOf(cut));
+				const fault = sweptFault(cut);
+				const code = 'code' in tooth ? tooth.code : null;
+				expect(code, JSON.stringify(cut)).toBe(fault && CODES[fault]);
+				if (code) said.push(code);
+			}
+		}
+	}
+	expect(new Set(said)).toEqual(new Set(Object.values(CODES)));
+});
 
 test('many of the random gears are undercut, and some are worn at the tip', () => {
 	const undercut = gears.filter((cut) => {

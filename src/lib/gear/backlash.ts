@@ -1,6 +1,7 @@
 /** Backlash of a pair, and the range that is recommended for it. Lengths in mm, angles in radians. */
 import type { MeshGeometry } from './contact-path';
-import { involute } from './involute';
+import { cosine, toDegrees } from './degrees';
+import { involuteOf } from './involute-line';
 import type { Member } from './member';
 import { SOURCES } from './sources';
 import { machinerysHandbookRange } from './tables/machinerys-handbook-backlash';
@@ -24,39 +25,107 @@ export function normalBacklash(question: BacklashQuestion, recorder: Recorder): 
 	const thickness = pinion.toothThickness !== null || wheel.toothThickness !== null;
 	if (centre === null || pinion.teeth === null || wheel.teeth === null || !(measured || thickness))
 		return null;
-	const sign = wheel.kind === 'internal' ? -1 : 1;
-	const radius = (centre * pinion.teeth) / (wheel.teeth + sign * pinion.teeth);
-	const pitch = (2 * Math.PI * radius) / pinion.teeth;
-	const at = (member: Member, rolling: number, sense: number) => {
-		const grown = involute(member.transverseAngle) - involute(operatingAngle);
-		return 2 * rolling * (arcThickness(member) / (member.pitchDiameter ?? NaN) + sense * grown);
-	};
+	const internal = wheel.kind === 'internal';
+	const counts = { N1: pinion.teeth, N2: wheel.teeth };
+	const rolling = rollingRadii({ ...counts, C: centre }, internal, recorder);
+	const pitch = recorder.step(
+		{ ...LENGTH, symbol: 'pw', name: 'pitch on the operating pitch circle', expression: '2 · π · rw1 / N1' },
+		{ ...counts, rw1: rolling.rw1 },
+		({ rw1, N1 }) => (2 * Math.PI * rw1) / N1
+	);
+	const invw = involuteOf(operatingAngle, 'w', recorder);
 	const transverse = recorder.step(
 		{
+			...LENGTH,
 			symbol: 'jt',
 			name: 'backlash on the operating pitch circle',
-			expression: 'pw - s1 - s2',
-			unit: 'mm',
-			source: SOURCES.mesh
+			expression: 'pw - s1 - s2'
 		},
 		{
 			pw: pitch,
-			s1: at(pinion, radius, 1),
-			s2: at(wheel, (radius * wheel.teeth) / pinion.teeth, sign)
+			s1: rollingThickness(pinion, { place: 1, rolling: rolling.rw1, invw }, recorder),
+			s2: rollingThickness(wheel, { place: 2, rolling: rolling.rw2, invw }, recorder)
 		},
 		({ pw, s1, s2 }) => withoutNoise(pw - s1 - s2)
 	);
 	const baseHelix = Math.asin(Math.sin(pinion.helixAngle) * Math.cos(pinion.normalAngle));
 	return recorder.step(
 		{
+			...LENGTH,
 			symbol: 'jn',
 			name: 'backlash across the flanks',
-			expression: 'jt · cos(αw) · cos(βb)',
-			unit: 'mm',
-			source: SOURCES.mesh
+			expression: 'jt · cos(αw) · cos(βb)'
 		},
-		{ jt: transverse, αw: (operatingAngle * 180) / Math.PI, βb: (baseHelix * 180) / Math.PI },
-		({ jt }) => jt * Math.cos(operatingAngle) * Math.cos(baseHelix)
+		{ jt: transverse, αw: toDegrees(operatingAngle), βb: toDegrees(baseHelix) },
+		({ jt, αw, βb }) => jt * cosine(αw) * cosine(βb)
+	);
+}
+
+const LENGTH = { unit: 'mm', source: SOURCES.mesh };
+
+/** Operating pitch radii in mm: the centre distance shared out by the teeth. Source: definition. */
+function rollingRadii(
+	terms: { N1: number; N2: number; C: number },
+	internal: boolean,
+	recorder: Recorder
+): { rw1: number; rw2: number } {
+	const teeth = internal ? 'N2 - N1' : 'N2 + N1';
+	const rw1 = recorder.step(
+		{
+			...LENGTH,
+			symbol: 'rw1',
+			name: 'operating pitch radius of the pinion',
+			expression: `C · N1 / (${teeth})`
+		},
+		terms,
+		({ C, N1, N2 }) => (C * N1) / (internal ? N2 - N1 : N2 + N1)
+	);
+	const rw2 = recorder.step(
+		{ ...LENGTH, symbol: 'rw2', name: 'operating pitch radius of the wheel', expression: 'rw1 · N2 / N1' },
+		{ ...terms, rw1 },
+		({ N1, N2, rw1 }) => (rw1 * N2) / N1
+	);
+	return { rw1, rw2 };
+}
+
+/** sw = 2 rw (st / d + inv αt - inv αw) in mm, an internal gear's with the involutes the other way round. */
+function rollingThickness(
+	member: Member,
+	{ place, rolling, invw }: { place: 1 | 2; rolling: number; invw: number },
+	recorder: Recorder
+): number {
+	const who = place === 1 ? 'of the pinion' : 'of the wheel';
+	const [st, rw, inv, d] = [`st${place}`, `rw${place}`, `inv${place}`, `d${place}`];
+	const internal = member.kind === 'internal';
+	const thickness = recorder.step(
+		{
+			...LENGTH,
+			symbol: st,
+			name: `arc thickness on the reference circle ${who}`,
+			expression:
+				member.toothThickness === null
+					? `mn · (π / 2 ${internal ? '-' : '+'} 2 · x · tan(αn)) / cos(β)`
+					: 'sn / cos(β)'
+		},
+		{
+			mn: member.normalModule,
+			x: member.profileShift,
+			αn: toDegrees(member.normalAngle),
+			sn: member.toothThickness ?? NaN,
+			β: toDegrees(member.helixAngle)
+		},
+		() => arcThickness(member)
+	);
+	const own = involuteOf(member.transverseAngle, place, recorder);
+	return recorder.step(
+		{
+			...LENGTH,
+			symbol: `s${place}`,
+			name: `arc thickness on the operating pitch circle ${who}`,
+			expression: `2 · ${rw} · (${st} / ${d} ${internal ? `- ${inv} + invw` : `+ ${inv} - invw`})`
+		},
+		{ [rw]: rolling, [st]: thickness, [d]: member.pitchDiameter ?? NaN, [inv]: own, invw },
+		() => 2 * rolling * (thickness / (member.pitchDiameter ?? NaN) + (internal ? -1 : 1) * (own - invw))
 	);
 }
 

@@ -239,6 +239,8 @@ export interface Outcome {
 		operatingPressureAngle: number;
 		/** In the transverse plane; `overlapRatio` is what a helix adds. */
 		contactRatio: number;
+		/** Where both have a flank: shorter by what undercut and fillets take, and judged. Null where that is not known. */
+		contactRatioUndercut: number | null;
 		overlapRatio: number;
 		normalBacklash: number | null;
 		huntingTooth: boolean;

@@ -7,6 +7,7 @@ import type { EvaluateInput, Outcome } from './contract';
 import { figuresOf, type Figures } from './figures';
 import { remediesFor } from './remedies';
 import { OUT_OF_RANGE } from './refusals';
+import { tipWearReviews } from './tip-wear';
 import { verdictOf } from './verdict';
 import { CORE_VERSION } from './version';
 import { Working } from './working';
@@ -22,7 +23,7 @@ export function evaluate(input: EvaluateInput): Outcome {
 		materialName: input.gear.material.name,
 		limits: figures.limits,
 		refusals: overflowed ? [...answer.refusals, OUT_OF_RANGE] : answer.refusals,
-		reviews: answer.reviews,
+		reviews: [...answer.reviews, ...tipWearReviews(input)],
 		warnings: [...compared, ...answer.warnings]
 	});
 	return {

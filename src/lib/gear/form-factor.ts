@@ -19,14 +19,13 @@ export const FEWEST_TEETH = 10;
 
 /**
  * What the table is asked for: teeth (virtual ones of a helical gear, Infinity for a rack), normal pressure angle in
- * degrees, shift in modules, and whether the tips are worn.
+ * degrees, shift in modules.
  */
 export interface TableTooth {
 	teeth: number;
 	pressureAngle: number;
 	form: ToothForm;
 	profileShift?: number | undefined;
-	tipWorn?: boolean | undefined;
 }
 
 const line = {
@@ -51,8 +50,8 @@ export function fewTeethRefusal(teeth: number): Reason | null {
 
 /** Whether the table holds this tooth: one of its three forms, whole, not shifted, of ten teeth or more. */
 export function handbookHolds(tooth: TableTooth): boolean {
-	const { teeth, pressureAngle, form, profileShift = 0, tipWorn = false } = tooth;
-	return !tipWorn && profileShift === 0 && teeth >= FEWEST_TEETH && columnOf(pressureAngle, form) !== null;
+	const { teeth, pressureAngle, form, profileShift = 0 } = tooth;
+	return profileShift === 0 && teeth >= FEWEST_TEETH && columnOf(pressureAngle, form) !== null;
 }
 
 /**

@@ -1,4 +1,5 @@
 /** Contact of two flanks at the pitch point, by Hertz. Moduli and stresses in MPa, lengths in mm, angles in radians. */
+import { cosine, sine, toDegrees } from './degrees';
 import { SOURCES } from './sources';
 import { unrecorded, type Recorder } from './working';
 
@@ -40,16 +41,30 @@ export function pitchPointCurvature(
 	{ angle, helixAngle, internal }: { angle: number; helixAngle: number; internal: boolean },
 	recorder: Recorder = unrecorded
 ): number {
-	const radius = (diameter: number) => (diameter * Math.sin(angle)) / (2 * Math.cos(helixAngle) ** 2);
+	const radius = (symbol: string, name: string, diameter: number) =>
+		recorder.step(
+			{
+				symbol,
+				name,
+				expression: helixAngle === 0 ? 'd · sin(α) / 2' : 'd · sin(α) / (2 · cos(β)²)',
+				unit: 'mm',
+				source: SOURCES.hertz
+			},
+			{ d: diameter, α: toDegrees(angle), β: toDegrees(helixAngle) },
+			({ d, α, β }) => (d * sine(α)) / (2 * cosine(β) ** 2)
+		);
 	return recorder.step(
 		{
 			symbol: 'cr',
 			name: 'curvature of the flanks at the pitch point',
-			expression: internal ? '1 / r1 - 1 / r2' : '1 / r1 + 1 / r2',
+			expression: wheel === null ? '1 / r1' : internal ? '1 / r1 - 1 / r2' : '1 / r1 + 1 / r2',
 			unit: '1/mm',
 			source: SOURCES.hertz
 		},
-		{ r1: radius(pinion), r2: wheel === null ? Infinity : radius(wheel) },
+		{
+			r1: radius('r1', "radius of the pinion's flank at the pitch point", pinion),
+			r2: wheel === null ? Infinity : radius('r2', "radius of the wheel's flank at the pitch point", wheel)
+		},
 		({ r1, r2 }) => 1 / r1 + (internal ? -1 : 1) / r2
 	);
 }
@@ -89,9 +104,9 @@ export function hertzContactStress(
 			W: force,
 			cr: line.curvature,
 			F: line.faceWidth,
-			α: (line.angle * 180) / Math.PI
+			α: toDegrees(line.angle)
 		},
-		({ Cp, W, cr, F }) => Cp * Math.sqrt((W * cr) / (F * Math.cos(line.angle)))
+		({ Cp, W, cr, F, α }) => Cp * Math.sqrt((W * cr) / (F * cosine(α)))
 	);
 }
 
@@ -113,9 +128,9 @@ export function hertzLoad(allowable: number, line: ContactLine, recorder: Record
 			Sh: allowable,
 			Cp: line.elastic,
 			F: line.faceWidth,
-			α: (line.angle * 180) / Math.PI,
+			α: toDegrees(line.angle),
 			cr: line.curvature
 		},
-		({ Sh, Cp, F, cr }) => ((Sh / Cp) ** 2 * F * Math.cos(line.angle)) / cr
+		({ Sh, Cp, F, α, cr }) => ((Sh / Cp) ** 2 * F * cosine(α)) / cr
 	);
 }

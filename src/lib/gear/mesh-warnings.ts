@@ -10,13 +10,30 @@ const PREFERRED_CONTACT = 1.4;
 type Mesh = NonNullable<Outcome['mesh']>;
 
 export function meshWarnings(mesh: Mesh, geometry: MeshGeometry): Reason[] {
-	return [contact(mesh), rootWarning(mesh, geometry), backlash(mesh, geometry)].filter(
+	const roots = shortenedWarnings(mesh);
+	return [contact(mesh), ...roots, rootWarning(mesh, geometry), backlash(mesh, geometry)].filter(
 		(reason) => reason !== null
 	);
 }
 
-function contact({ contactRatio, overlapRatio }: Mesh): Reason | null {
-	const total = contactRatio + overlapRatio;
+/** Below this the two figures read the same. */
+const SHORTENED = 0.005;
+
+/** What the roots take from the contact is told beside every verdict, with both figures. */
+export function shortenedWarnings({ contactRatio, contactRatioUndercut, overlapRatio }: Mesh): Reason[] {
+	if (contactRatioUndercut === null || contactRatio - contactRatioUndercut < SHORTENED) return [];
+	const [whole, left] = [contactRatio + overlapRatio, contactRatioUndercut + overlapRatio];
+	return [
+		{
+			code: 'contact-shortened',
+			text: `The roots shorten the contact: the flanks begin so high that the contact ratio is ${left.toFixed(2)} instead of ${whole.toFixed(2)}.`,
+			values: { left, whole }
+		}
+	];
+}
+
+function contact({ contactRatio, contactRatioUndercut, overlapRatio }: Mesh): Reason | null {
+	const total = (contactRatioUndercut ?? contactRatio) + overlapRatio;
 	if (total >= PREFERRED_CONTACT) return null;
 	const values = { contactRatio: total };
 	return total < LEAST_CONTACT

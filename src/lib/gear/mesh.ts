@@ -3,10 +3,12 @@
  * interference. Lengths in mm, angles in radians inside; the figures of the contract are in mm and degrees.
  */
 import { normalBacklash, type BacklashQuestion } from './backlash';
+import { isUndercut, pathOnFlanks } from './contact-on-flanks';
 import { contactPath, interferes, type MeshGeometry } from './contact-path';
 import type { Outcome, Reason } from './contract';
+import { cosine, sine, toDegrees } from './degrees';
 import { tipsFoul } from './internal-tips';
-import { isUndercut, type Member } from './member';
+import type { Member } from './member';
 import {
 	basePitchRefusal,
 	CENTRES_TOO_CLOSE,
@@ -15,11 +17,11 @@ import {
 	helixRefusal,
 	kindsRefusal
 } from './mesh-refusals';
-import { meshWarnings } from './mesh-warnings';
+import { meshWarnings, shortenedWarnings } from './mesh-warnings';
 import { operatingOf } from './operating';
-import { straightDepth } from './rack';
 import { SOURCES } from './sources';
 import { OUT_OF_RANGE } from './refusals';
+import { tipsOfPairRefusal } from './tip-wear';
 import type { Recorder } from './working';
 
 export interface MeshQuestion {
@@ -43,9 +45,12 @@ const source = SOURCES.mesh;
 
 export function meshOf(question: MeshQuestion, recorder: Recorder): MeshAnswer {
 	const { gear, mate } = question;
-	const refusals = [basePitchRefusal(gear, mate), helixRefusal(gear, mate), kindsRefusal(gear, mate)].filter(
-		(reason) => reason !== null
-	);
+	const refusals = [
+		basePitchRefusal(gear, mate),
+		helixRefusal(gear, mate),
+		kindsRefusal(gear, mate),
+		tipsOfPairRefusal(gear, mate)
+	].filter((reason) => reason !== null);
 	if (refusals.length > 0) return { figures: null, refusals, warnings: [] };
 
 	const geometry = operatingOf(question, recorder);
@@ -53,50 +58,68 @@ export function meshOf(question: MeshQuestion, recorder: Recorder): MeshAnswer {
 		const refusal = question.centreDistance === null ? SHIFTS_DO_NOT_MESH : CENTRES_TOO_CLOSE;
 		return { figures: null, refusals: [refusal], warnings: [] };
 	}
-	const contactRatio = contactRatioOf(geometry, recorder);
+	const { contactRatio, contactRatioUndercut, refusal } = contactRatiosOf(geometry, recorder);
 	const backlash: BacklashQuestion = { ...geometry, measured: question.centreDistance !== null };
 	const figures = {
 		ratio: geometry.ratio,
 		standardCentreDistance: geometry.standardCentre,
-		operatingPressureAngle: (geometry.operatingAngle * 180) / Math.PI,
+		operatingPressureAngle: toDegrees(geometry.operatingAngle),
 		contactRatio,
+		contactRatioUndercut,
 		overlapRatio: overlapRatio(geometry.pinion, question.faceWidth, recorder),
 		normalBacklash: normalBacklash(backlash, recorder),
 		huntingTooth: isHunting(gear.teeth, mate.teeth),
-		undercut: {
-			gear: isUndercut(gear, straightDepth(gear.rack)),
-			mate: isUndercut(mate, straightDepth(mate.rack))
-		},
+		undercut: { gear: isUndercut(gear), mate: isUndercut(mate) },
 		interference: interferes(geometry) || tipsFoul(geometry)
 	};
 	if (Object.values(figures).some((value) => typeof value === 'number' && !Number.isFinite(value))) {
 		return { figures: null, refusals: [OUT_OF_RANGE], warnings: [] };
 	}
-	const discontinuous = discontinuousRefusal(contactRatio + figures.overlapRatio);
-	return {
-		figures,
-		refusals: discontinuous ? [discontinuous] : [],
-		warnings: discontinuous ? [] : meshWarnings(figures, geometry)
-	};
+	const judged = (contactRatioUndercut ?? contactRatio) + figures.overlapRatio;
+	const refused = refusal ?? discontinuousRefusal(judged);
+	return refused
+		? { figures, refusals: [refused], warnings: shortenedWarnings(figures) }
+		: { figures, refusals: [], warnings: meshWarnings(figures, geometry) };
 }
 
 /**
- * Contact ratio in the transverse plane: path of contact over base pitch.
+ * Contact ratios in the transverse plane, path of contact over base pitch: by the published path from tip to tip, and by
+ * what the roots leave of it. The second is null where it is not known.
  * Source: Shigley, Mechanical Engineering Design, 8th ed., sec. 13-6 (edition from memory).
  */
-function contactRatioOf(geometry: MeshGeometry, recorder: Recorder): number {
+function contactRatiosOf(
+	geometry: MeshGeometry,
+	recorder: Recorder
+): { contactRatio: number; contactRatioUndercut: number | null; refusal: Reason | null } {
 	const { transverseModule, transverseAngle } = geometry.pinion;
-	return recorder.step(
-		{
-			symbol: 'mp',
-			name: 'contact ratio, path of contact over base pitch',
-			expression: 'Z / (π · m · cos(αt))',
-			unit: '1',
-			source
-		},
-		{ Z: contactPath(geometry, recorder), m: transverseModule, αt: (transverseAngle * 180) / Math.PI },
-		({ Z, m }) => Z / (Math.PI * m * Math.cos(transverseAngle))
+	const path = contactPath(geometry, recorder);
+	const pitch = recorder.step(
+		{ symbol: 'pb', name: 'base pitch', expression: 'π · m · cos(αt)', unit: 'mm', source },
+		{ m: transverseModule, αt: toDegrees(transverseAngle) },
+		({ m, αt }) => Math.PI * m * cosine(αt)
 	);
+	const ratio = { symbol: 'mp', unit: '1', source };
+	const contactRatio = recorder.step(
+		{ ...ratio, name: 'contact ratio, path of contact over base pitch', expression: 'Z / pb' },
+		{ Z: path, pb: pitch },
+		({ Z, pb }) => Z / pb
+	);
+	const onFlanks = pathOnFlanks(geometry, recorder);
+	if (onFlanks.path === null || onFlanks.path >= path) {
+		const contactRatioUndercut = onFlanks.path === null ? null : contactRatio;
+		return { contactRatio, contactRatioUndercut, refusal: onFlanks.refusal };
+	}
+	const contactRatioUndercut = recorder.step(
+		{
+			...ratio,
+			symbol: 'mu',
+			name: 'contact ratio between the beginnings of the flanks: it is judged',
+			expression: 'Zu / pb'
+		},
+		{ Zu: onFlanks.path, pb: pitch },
+		({ Zu, pb }) => Zu / pb
+	);
+	return { contactRatio, contactRatioUndercut, refusal: null };
 }
 
 /** What a helix adds to the contact ratio: F sin β / (π mn). Source: as of the contact ratio. */
@@ -104,8 +127,8 @@ function overlapRatio({ helixAngle, normalModule }: Member, faceWidth: number, r
 	if (helixAngle === 0) return 0;
 	return recorder.step(
 		{ symbol: 'mF', name: 'overlap ratio', expression: 'F · sin(β) / (π · mn)', unit: '1', source },
-		{ F: faceWidth, β: (helixAngle * 180) / Math.PI, mn: normalModule },
-		({ F, mn }) => (F * Math.sin(helixAngle)) / (Math.PI * mn)
+		{ F: faceWidth, β: toDegrees(helixAngle), mn: normalModule },
+		({ F, β, mn }) => (F * sine(β)) / (Math.PI * mn)
 	);
 }
 

@@ -1,6 +1,8 @@
 /** Where two members run: ratio, standard centre distance, and the angle on their operating pitch circles. */
 import type { MeshGeometry } from './contact-path';
-import { inverseInvolute, involute } from './involute';
+import { cosine, tangent, toDegrees, toRadians } from './degrees';
+import { inverseInvolute } from './involute';
+import { involuteOf } from './involute-line';
 import type { Member } from './member';
 import { SOURCES } from './sources';
 import type { Recorder } from './working';
@@ -21,7 +23,6 @@ interface Pair {
 }
 
 const source = SOURCES.mesh;
-const degrees = (radians: number) => (radians * 180) / Math.PI;
 
 /**
  * Where the two run: at the measured centre distance, else where nominal teeth have no backlash; a rack at its own angle.
@@ -32,9 +33,10 @@ export function operatingOf(
 	recorder: Recorder
 ): MeshGeometry | null {
 	const [pinion, wheel] = [gear, mate].sort((a, b) => sizeOf(a) - sizeOf(b)) as [Member, Member];
+	transverseAngleLine(pinion, recorder);
 	if (pinion.teeth === null) return null;
 	if (wheel.teeth === null) {
-		const operatingAngle = wheel.transverseAngle;
+		const operatingAngle = ownAngle(wheel, 2, recorder);
 		return { pinion, wheel, ratio: null, standardCentre: null, centre: null, operatingAngle };
 	}
 	const counts = { N1: pinion.teeth, N2: wheel.teeth };
@@ -55,7 +57,7 @@ export function operatingOf(
 			? unmeasuredAngle(pair, recorder)
 			: measuredAngle(pair, { bases, standardCentre, centreDistance }, recorder);
 	if (operatingAngle === null) return null;
-	const centre = centreDistance ?? bases / Math.cos(operatingAngle);
+	const centre = centreDistance ?? unmeasuredCentre(pair, { bases, operatingAngle }, recorder);
 	return { pinion, wheel, ratio, standardCentre, centre, operatingAngle };
 }
 
@@ -96,12 +98,8 @@ function measuredAngle(
 	}: { bases: number; standardCentre: number; centreDistance: number },
 	recorder: Recorder
 ): number | null {
-	const cosine = bases / centreDistance;
-	if (!(cosine < 1)) return null;
-	// At the standard distance the angle is the standard one, to the last digit.
-	const standard = areAlike(pinion, wheel) && centreDistance === standardCentre;
-	const angle = standard ? pinion.transverseAngle : Math.acos(cosine);
-	recorder.step(
+	if (!(bases / centreDistance < 1)) return null;
+	const angle = recorder.step(
 		{
 			symbol: 'αw',
 			name: 'operating pressure angle at the measured centre distance',
@@ -113,13 +111,16 @@ function measuredAngle(
 			...counts,
 			m1: pinion.transverseModule,
 			m2: wheel.transverseModule,
-			α1: degrees(pinion.transverseAngle),
-			α2: degrees(wheel.transverseAngle),
+			α1: toDegrees(pinion.transverseAngle),
+			α2: toDegrees(wheel.transverseAngle),
 			C: centreDistance
 		},
-		() => degrees(angle)
+		({ m1, m2, N1, N2, α1, α2, C }) =>
+			toDegrees(Math.acos(Math.min(1, (m2 * N2 * cosine(α2) + sign * (m1 * N1 * cosine(α1))) / (2 * C))))
 	);
-	return angle;
+	// At the standard distance the angle is the standard one, to the last digit.
+	const standard = areAlike(pinion, wheel) && centreDistance === standardCentre;
+	return standard ? pinion.transverseAngle : toRadians(angle);
 }
 
 /**
@@ -130,29 +131,100 @@ function measuredAngle(
 function unmeasuredAngle(pair: Pair, recorder: Recorder): number | null {
 	const { pinion, wheel, counts, sign } = pair;
 	const [x1, x2] = [pinion.profileShift, wheel.profileShift];
-	if (areAlike(pinion, wheel) && x2 + sign * x1 === 0) return pinion.transverseAngle;
+	if (areAlike(pinion, wheel) && x2 + sign * x1 === 0) return ownAngle(pinion, 1, recorder);
 	const both = sign === 1 ? '+' : '-';
 	const inv = recorder.step(
 		{
-			symbol: 'invαw',
+			symbol: 'invw',
 			name: 'involute of the operating pressure angle, by the shifts',
-			expression: `(N2 · inv2 ${both} N1 · inv1 + 2 · (x2 · tan2 ${both} x1 · tan1)) / (N2 ${both} N1)`,
+			expression: `(N2 · inv2 ${both} N1 · inv1 + 2 · (x2 · tan(αn2) ${both} x1 · tan(αn1))) / (N2 ${both} N1)`,
 			unit: '1',
 			source
 		},
 		{
 			...counts,
-			inv1: involute(pinion.transverseAngle),
-			inv2: involute(wheel.transverseAngle),
+			inv1: involuteOf(pinion.transverseAngle, 1, recorder),
+			inv2: involuteOf(wheel.transverseAngle, 2, recorder),
 			x1,
 			x2,
-			tan1: Math.tan(pinion.normalAngle),
-			tan2: Math.tan(wheel.normalAngle)
+			αn1: toDegrees(pinion.normalAngle),
+			αn2: toDegrees(wheel.normalAngle)
 		},
-		({ N1, N2, inv1, inv2, tan1, tan2 }) =>
-			(N2 * inv2 + sign * (N1 * inv1) + 2 * (x2 * tan2 + sign * (x1 * tan1))) / (N2 + sign * N1)
+		({ N1, N2, inv1, inv2, αn1, αn2 }) =>
+			(N2 * inv2 + sign * (N1 * inv1) + 2 * (x2 * tangent(αn2) + sign * (x1 * tangent(αn1)))) /
+			(N2 + sign * N1)
 	);
-	return inv > 0 ? inverseInvolute(inv) : null;
+	if (!(inv > 0)) return null;
+	const angle = recorder.step(
+		{
+			symbol: 'αw',
+			name: 'operating pressure angle, by the shifts',
+			expression: 'from the involute: tan(αw) - π · αw / 180 = invw',
+			unit: '°',
+			source
+		},
+		{ invw: inv },
+		({ invw }) => toDegrees(inverseInvolute(invw))
+	);
+	return toRadians(angle);
+}
+
+/** C = (rb2 + rb1) / cos αw in mm, internal with a minus: where nominal teeth have no backlash. Source: definition. */
+function unmeasuredCentre(
+	{ pinion, wheel, counts, sign }: Pair,
+	{ bases, operatingAngle }: { bases: number; operatingAngle: number },
+	recorder: Recorder
+): number {
+	return recorder.step(
+		{
+			symbol: 'C',
+			name: 'centre distance without backlash, by the shifts',
+			expression: `(m2 · N2 · cos(α2) ${sign === 1 ? '+' : '-'} m1 · N1 · cos(α1)) / (2 · cos(αw))`,
+			unit: 'mm',
+			source
+		},
+		{
+			...counts,
+			m1: pinion.transverseModule,
+			m2: wheel.transverseModule,
+			α1: toDegrees(pinion.transverseAngle),
+			α2: toDegrees(wheel.transverseAngle),
+			αw: toDegrees(operatingAngle)
+		},
+		() => bases / Math.cos(operatingAngle)
+	);
+}
+
+/** A rack, and members whose shifts make up for each other, run at the angle of the teeth themselves. */
+function ownAngle({ transverseAngle }: Member, place: 1 | 2, recorder: Recorder): number {
+	recorder.step(
+		{
+			symbol: 'αw',
+			name: 'operating pressure angle, that of the teeth',
+			expression: `α${place}`,
+			unit: '°',
+			source
+		},
+		{ [`α${place}`]: toDegrees(transverseAngle) },
+		() => toDegrees(transverseAngle)
+	);
+	return transverseAngle;
+}
+
+/** A helical pair runs in its transverse plane. Source: as of `memberOf`. */
+function transverseAngleLine({ helixAngle, normalAngle, transverseAngle }: Member, recorder: Recorder): void {
+	if (helixAngle === 0) return;
+	recorder.step(
+		{
+			symbol: 'αt',
+			name: 'transverse pressure angle',
+			expression: 'arctan(tan(αn) / cos(β))',
+			unit: '°',
+			source
+		},
+		{ αn: toDegrees(normalAngle), β: toDegrees(helixAngle) },
+		() => toDegrees(transverseAngle)
+	);
 }
 
 function areAlike(one: Member, other: Member): boolean {

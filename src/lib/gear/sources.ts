@@ -16,6 +16,7 @@ export const SOURCES = {
 	lewis:
 		'Lewis bending stress; Shigley, Mechanical Engineering Design, 8th ed., ch. 14 (edition from memory)',
 	generatedTooth: 'Lewis parabola on the generated tooth; as in the AGMA 225 tables (from memory)',
+	generatedFlank: 'definition; Litvin, Gear Geometry and Applied Theory (from memory)',
 	stressConcentration: 'Dolan and Broghamer (1942); AGMA 908-B89 (from memory)',
 	hertz:
 		'contact stress by Hertz; Shigley, Mechanical Engineering Design, 8th ed., sec. 14-2 (edition from memory)',
@@ -27,5 +28,7 @@ export const SOURCES = {
 	definition: 'definition',
 	commonPractice: 'common practice',
 	plantRule: 'rule of the plant',
-	propagation: 'first-order propagation; JCGM 100:2008, 5.1.2; 95 % one-sided, normal distribution'
+	propagation: 'first-order propagation; JCGM 100:2008, 5.1.2; 95 % one-sided, normal distribution',
+	reliability:
+		'first-order reliability; Hasofer and Lind (1974) (from memory); 95 % one-sided, normal distribution'
 } as const;

@@ -9,6 +9,7 @@ import { lewisFormFactorByGeometry, rackFormFactor } from './form-factor-geometr
 import { virtualTeeth, type Member } from './member';
 import { SOURCES } from './sources';
 import { stressConcentration } from './stress-concentration';
+import { stubRefusal } from './tip-wear';
 import type { Recorder } from './working';
 
 type FormFactorFigures = Pick<
@@ -25,6 +26,8 @@ export interface FormFactorAnswer {
  * Form factor Y of a member by both methods as far as each reaches, and the one that the rule takes. `handbook` takes
  * the table where it holds the form and the geometry for every other; `lower-of-both` the lower. A rack and an
  * internal gear have the rack's factor: for the internal gear a lower bound, since its teeth widen at the root.
+ * A load on a tip that is worn lower bends the tooth less: by layout alone Y would rise without bound. A worn tooth is
+ * taken as unworn instead, with the lower of both methods whatever the rule, so that wear never adds to its strength.
  */
 export function formFactorOf(
 	member: Member,
@@ -34,7 +37,8 @@ export function formFactorOf(
 ): FormFactorAnswer {
 	const asRack = member.teeth === null || member.kind === 'internal';
 	const refusedCount = asRack || member.teeth === null ? null : fewTeethRefusal(member.teeth);
-	if (refusedCount) return { figures: NO_FORM_FACTOR, refusal: refusedCount };
+	const refused = refusedCount ?? stubRefusal(member);
+	if (refused) return { figures: NO_FORM_FACTOR, refusal: refused };
 	const teeth =
 		asRack || member.teeth === null ? Infinity : virtualTeeth(member.teeth, member.helixAngle, recorder);
 
@@ -42,15 +46,13 @@ export function formFactorOf(
 		teeth,
 		pressureAngle: (member.normalAngle * 180) / Math.PI,
 		form,
-		profileShift: asRack ? 0 : member.profileShift,
-		tipWorn: member.tipWear > 0
+		profileShift: asRack ? 0 : member.profileShift
 	};
 	const handbook = handbookHolds(tooth) ? lewisFormFactor(tooth, recorder) : null;
-	const tipWear = member.tipWear / member.normalModule;
 	const byGeometry = asRack
-		? rackFormFactor(member.rack, tipWear, recorder)
+		? rackFormFactor(member.rack, 0, recorder)
 		: lewisFormFactorByGeometry(
-				{ teeth, rack: member.rack, profileShift: member.profileShift, tipWear },
+				{ teeth, rack: member.rack, profileShift: member.profileShift, tipWear: 0 },
 				recorder
 			);
 	const section = 'Y' in byGeometry ? byGeometry : null;
@@ -60,7 +62,7 @@ export function formFactorOf(
 		formFactorGeometry: geometry,
 		stressConcentration: section && stressConcentration(section, member.normalAngle, recorder)
 	};
-	const taken = takenHead(rule, handbook, geometry);
+	const taken = takenHead(member.tipWear > 0 ? 'lower-of-both' : rule, handbook, geometry);
 	if (!taken) {
 		const refusal = 'code' in byGeometry ? byGeometry : null;
 		return { figures: { ...NO_FORM_FACTOR, ...figures }, refusal };

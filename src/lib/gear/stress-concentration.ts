@@ -18,8 +18,18 @@ export function stressConcentration(
 ): number | null {
 	const below = rack.dedendum - rack.tipRadius - profileShift;
 	const curve = teeth === Infinity ? 0 : (below * below) / (teeth / 2 + below);
-	const filletRadius = rack.tipRadius + curve;
-	if (!(filletRadius > 0)) return null;
+	if (!(rack.tipRadius + curve > 0)) return null;
+	const filletRadius = recorder.step(
+		{
+			symbol: 'rf',
+			name: 'least radius of the fillet, in modules',
+			expression: teeth === Infinity ? 'ρ' : 'ρ + (hf - ρ - x)² / (N / 2 + hf - ρ - x)',
+			unit: '1',
+			source: SOURCES.stressConcentration
+		},
+		{ ρ: rack.tipRadius, hf: rack.dedendum, x: profileShift, N: teeth },
+		({ ρ }) => ρ + curve
+	);
 	return recorder.step(
 		{
 			symbol: 'Kf',

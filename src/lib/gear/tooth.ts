@@ -6,6 +6,7 @@ import type { Reason } from './contract';
 import { filletPoint, tipCentre, type Point } from './fillet';
 import { involute } from './involute';
 import { largestTipRadius, straightDepth, type BasicRack } from './rack';
+import { nominalThickness } from './thickness';
 
 export interface ToothShape {
 	/** Need not be whole: a helical gear's virtual teeth are not. */
@@ -16,16 +17,19 @@ export interface ToothShape {
 	tipWear: number;
 }
 
-export interface Tooth extends ToothShape {
+/** Where the fillet ends and the involute begins; there the fillet's angle is `formAngle`. */
+export interface FlankStart {
+	formRadius: number;
+	formAngle: number;
+	undercut: boolean;
+}
+
+export interface Tooth extends ToothShape, FlankStart {
 	pitchRadius: number;
 	baseRadius: number;
 	rootRadius: number;
 	/** After wear. */
 	tipRadius: number;
-	/** Where the fillet ends and the involute begins; there the fillet's angle is `formAngle`. */
-	formRadius: number;
-	formAngle: number;
-	undercut: boolean;
 }
 
 /** Fewest teeth that are drawn; the Lewis method itself starts at ten. */
@@ -41,33 +45,41 @@ export function generateTooth(shape: ToothShape): Tooth | Reason {
 	const { teeth, rack, profileShift, tipWear } = shape;
 	const refused = rackRefusal(rack) ?? fewRefusal(teeth);
 	if (refused) return refused;
-	if (tipCentre(rack).depth - profileShift < 0) return SHIFT_TOO_LARGE;
+	const start = flankStart(shape);
+	if ('code' in start) return start;
 
 	const pitchRadius = teeth / 2;
 	const baseRadius = pitchRadius * Math.cos(rack.pressureAngle);
 	const rootRadius = pitchRadius - rack.dedendum + profileShift;
 	const tipRadius = pitchRadius + rack.addendum + profileShift - tipWear;
-	const deepest = pitchRadius * Math.sin(rack.pressureAngle) ** 2;
-	const undercut = straightDepth(rack) - profileShift > deepest * (1 + ROUNDING);
-	if (!(rootRadius > 0)) return UNDERCUT_TOO_DEEP;
-	const formAngle = undercut ? undercutAngle(shape) : rack.pressureAngle;
+	if (tipRadius <= start.formRadius) return TIP_WORN_AWAY;
+
+	const tooth = { ...shape, pitchRadius, baseRadius, rootRadius, tipRadius, ...start };
+	return halfThicknessAngle(tooth, tipRadius) > 0 ? tooth : TOOTH_POINTED;
+}
+
+/**
+ * Where the rack lets the involute begin, or why it leaves none below the pitch circle. Rolling geometry, so it holds
+ * for every count and angle, and in the transverse plane too; the Lewis method has narrower limits.
+ */
+export function flankStart({ teeth, rack, profileShift }: Omit<ToothShape, 'tipWear'>): FlankStart | Reason {
+	if (tipCentre(rack).depth - profileShift < 0) return SHIFT_TOO_LARGE;
+	if (!(teeth / 2 - rack.dedendum + profileShift > 0)) return UNDERCUT_TOO_DEEP;
+	const undercut = isUndercutBy(rack, teeth, profileShift);
+	const formAngle = undercut ? undercutAngle(teeth, rack, profileShift) : rack.pressureAngle;
 	if (formAngle === null) return UNDERCUT_TOO_DEEP;
 	const end = filletPoint(rack, teeth, profileShift, formAngle);
 	const formRadius = Math.hypot(end.x, end.y);
-	if (formRadius >= pitchRadius) return UNDERCUT_TOO_DEEP;
-	if (tipRadius <= formRadius) return TIP_WORN_AWAY;
+	return formRadius < teeth / 2 ? { formRadius, formAngle, undercut } : UNDERCUT_TOO_DEEP;
+}
 
-	const tooth = {
-		...shape,
-		pitchRadius,
-		baseRadius,
-		rootRadius,
-		tipRadius,
-		formRadius,
-		formAngle,
-		undercut
-	};
-	return halfThicknessAngle(tooth, tipRadius) > 0 ? tooth : TOOTH_POINTED;
+/**
+ * Whether the rack cuts into the involute at the root, all in modules of one plane: hs - x > r sin² α, hs its straight
+ * depth. Source: Bevan, The Theory of Machines, Ex. 10.4, p. 334.
+ */
+export function isUndercutBy(rack: BasicRack, teeth: number, profileShift: number): boolean {
+	const deepest = (teeth / 2) * Math.sin(rack.pressureAngle) ** 2;
+	return straightDepth(rack) - profileShift > deepest * (1 + ROUNDING);
 }
 
 /**
@@ -75,11 +87,11 @@ export function generateTooth(shape: ToothShape): Tooth | Reason {
  * θ = (π / 2 + 2 x tan α) / N + inv α - inv αR, cos αR = rb / R. Source: involute geometry (definition).
  */
 export function halfThicknessAngle(
-	tooth: Pick<Tooth, keyof ToothShape | 'baseRadius'>,
+	tooth: Pick<Tooth, 'teeth' | 'rack' | 'profileShift' | 'baseRadius'>,
 	radius: number
 ): number {
 	const { teeth, profileShift, rack, baseRadius } = tooth;
-	const atPitch = (Math.PI / 2 + 2 * profileShift * Math.tan(rack.pressureAngle)) / teeth;
+	const atPitch = nominalThickness(1, profileShift, rack.pressureAngle) / teeth;
 	return atPitch + involute(rack.pressureAngle) - involute(pressureAngleAt(baseRadius, radius));
 }
 
@@ -120,9 +132,9 @@ export function toothOutline(tooth: Tooth, steps: number): Point[] {
  * Where an undercutting fillet crosses the involute: the fillet starts in the tooth space, beyond the flank, and dives
  * into the tooth before it reaches the base circle. Null where no involute is left to cross.
  */
-function undercutAngle({ teeth, rack, profileShift, tipWear }: ToothShape): number | null {
+function undercutAngle(teeth: number, rack: BasicRack, profileShift: number): number | null {
 	const baseRadius = (teeth / 2) * Math.cos(rack.pressureAngle);
-	const shape = { teeth, rack, profileShift, tipWear, baseRadius };
+	const shape = { teeth, rack, profileShift, baseRadius };
 	const beyondFlank = (psi: number) => {
 		const { x, y } = filletPoint(rack, teeth, profileShift, psi);
 		const radius = Math.hypot(x, y);

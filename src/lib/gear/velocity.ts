@@ -19,6 +19,8 @@ interface Law {
 	share: (V: number) => number;
 	/** Usual end of range in ft/min. */
 	end: number;
+	/** The furthest that any text goes, where that is further. */
+	furthest?: number;
 	source: string;
 }
 
@@ -32,14 +34,14 @@ const linear = (constant: number, end: number, source: string): Law => ({
 });
 
 /**
- * Ends of range. Cast: 1,000 ft/min (2,000 in older texts: a plant that follows those raises its speed limit).
+ * Ends of range. Cast: 1,000 ft/min, 2,000 in older texts, which a plant that follows them states as its speed limit.
  * Cut: 2,000 ft/min by the 600 law, 4,000 ft/min by the 1200 law (Faires; Doughtie & Vallance, from memory).
- * Hobbed: 4,000 ft/min. Ground and non-metallic: the texts name no end; common practice here is 10,000 ft/min
- * (where the dynamic-factor charts end, from memory) and 6,000 ft/min (where our tabulated check values end),
- * because at an absurd speed a given power needs hardly any force and every gear would seem to carry it.
+ * Hobbed: 4,000 ft/min. Ground: 10,000 ft/min (where the dynamic-factor charts end, from memory). Non-metallic: a pinion
+ * of it on metal is held to 1,500 to 3,000 ft/min in the texts (from memory). An end there must be, because at an absurd
+ * speed a given power needs hardly any force and every gear would seem to carry it.
  */
 const LAWS: Record<VelocityLaw, Law> = {
-	cast: linear(600, 1000, SOURCES.velocityFactor),
+	cast: { ...linear(600, 1000, SOURCES.velocityFactor), furthest: 2000 },
 	cut: linear(1200, 4000, SOURCES.velocityFactor),
 	'cut-600': linear(600, 2000, SOURCES.commercialCut),
 	hobbed: {
@@ -63,7 +65,7 @@ const LAWS: Record<VelocityLaw, Law> = {
 		factor: (V) => 1 / (150 / (200 + V) + 0.25),
 		shareExpression: 'Vf · 150 / (200 + Vf)² / (150 / (200 + Vf) + 0.25)',
 		share: (V) => (V * 150) / (200 + V) ** 2 / (150 / (200 + V) + 0.25),
-		end: 6000,
+		end: 3000,
 		source: SOURCES.nonMetallic
 	}
 };
@@ -97,9 +99,17 @@ export function velocityLawOf(finish: Finish, metallic: boolean, cutLaw: CutLaw)
 	return finish === 'cut' && cutLaw === 600 ? 'cut-600' : finish;
 }
 
-/** Highest velocity in m/s at which the law is used: the plant's limit for the finish, else the law's own end. */
+/**
+ * Highest velocity in m/s at which the law is used: the plant's limit for the finish, but never beyond the furthest that a
+ * published text takes the law; without a limit of the plant the law's own end. A plant may know its gears better than
+ * a book, yet the law's figures beyond its end are nobody's: they are not given, rather than given with a remark.
+ * @example velocityEnd('cast', 'cast', { cast: { value: 500, unit: 'm/s' }, cut: null, hobbed: null, ground: null }) // 10.16
+ */
 export function velocityEnd(law: VelocityLaw, finish: Finish, speedLimit: Rules['speedLimit']): number {
-	return toSI(speedLimit[finish] ?? { value: LAWS[law].end, unit: 'ft/min' });
+	const { end, furthest = end } = LAWS[law];
+	const feet = (value: number) => toSI({ value, unit: 'ft/min' });
+	const limit = speedLimit[finish];
+	return limit ? Math.min(toSI(limit), feet(furthest)) : feet(end);
 }
 
 /**

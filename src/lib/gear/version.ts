@@ -16,5 +16,9 @@
  *        corners of tips are read as what they show, spans in the root with a growing doubt (were the formula's). What
  *        fits no gear is known better: its spans stray together, its depth less, and the old cast cycloidal wheels
  *        are among it by their own height.
+ *        Contact is judged between the ends of the flanks: pairs with undercut teeth that lose contact are refused or go
+ *        to review. A worn tip gives a tooth no strength and goes to review. The low end is taken at the design point
+ *        over the whole accepted range of doubts. Non-metallic teeth end at 3,000 ft/min, and no plant's limit extends
+ *        a law.
  */
 export const CORE_VERSION = '1.2.0';

@@ -6,6 +6,7 @@
 import { z } from 'zod';
 import type { EvaluateInput, InvalidInput } from '$lib/gear/contract';
 import { LENGTH_UNITS } from '$lib/gear/quantity';
+import { MOST_UNCERTAIN } from '$lib/gear/uncertainty';
 import { invalidInput } from './invalid-input';
 import { must, oneOf, strictFields } from './plain-words';
 import { force, length, modulus, power, speed, stress, torque, velocity } from './quantity';
@@ -165,10 +166,12 @@ const rules = strictFields('Rules', {
 	})
 }).partial();
 
+const fraction = (of: string, most: number) => between(`Uncertainty of the ${of} (a fraction)`, 0, most);
+
 const uncertainty = strictFields('Uncertainty', {
-	faceWidth: between('Uncertainty of the face width (a fraction)', 0, 0.5),
-	load: between('Uncertainty of the load (a fraction)', 0, 0.5),
-	speed: between('Uncertainty of the speed (a fraction)', 0, 0.5)
+	faceWidth: fraction('face width', MOST_UNCERTAIN.faceWidth),
+	load: fraction('load', MOST_UNCERTAIN.load),
+	speed: fraction('speed', MOST_UNCERTAIN.speed)
 }).partial();
 
 export const evaluateInput = strictFields('Check', {

@@ -55,6 +55,7 @@ export const outcome: z.ZodType<Outcome> = z.object({
 			standardCentreDistance: figure,
 			operatingPressureAngle: z.number(),
 			contactRatio: z.number(),
+			contactRatioUndercut: figure,
 			overlapRatio: z.number(),
 			normalBacklash: figure,
 			huntingTooth: z.boolean(),
@@ -98,7 +99,7 @@ export const outcome: z.ZodType<Outcome> = z.object({
 				of: z.literal('mate').optional()
 			})
 		)
-		.max(100),
+		.max(200),
 	gears: z
 		.array(
 			z.object({

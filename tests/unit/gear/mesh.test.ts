@@ -1,5 +1,6 @@
 /** What does not mesh is refused by name, what runs badly is told, and what the figures of a mesh are. */
 import { describe, expect, test } from 'vitest';
+import { contactPath } from '$lib/gear/contact-path';
 import type { ToothedPart } from '$lib/gear/contract';
 import { memberOf, type Member } from '$lib/gear/member';
 import { meshOf } from '$lib/gear/mesh';
@@ -130,6 +131,7 @@ describe('is told', () => {
 		const straight = { addendum: 1, dedendum: 1, tipRadius: 0 };
 		const long = { addendum: 1.2, dedendum: 1.2, tipRadius: 0 };
 		expect(warnings(part({ teeth: 18, form: straight }), part({ teeth: 60, form: long }))).toEqual([
+			'contact-shortened',
 			'interference'
 		]);
 		const ring = part({ kind: 'internal', teeth: 30 });
@@ -147,6 +149,100 @@ describe('is told', () => {
 		expect(warnings(thick(5.5), wheel, 170)).toEqual(['backlash-above-range']);
 		expect(warnings(thick(6.4), wheel, 170)).toEqual(['no-backlash']);
 		expect(warnings(nominal, wheel, 169.9)).toEqual(['no-backlash']);
+	});
+});
+
+describe('undercut takes contact away', () => {
+	// The path cut at √(rf² - rb²) of both members; recomputed by layout of the generated teeth.
+	const pairs: [teeth: number, mates: number, angle: number, published: number, left: number][] = [
+		[15, 15, 14.5, 1.235, 0.702],
+		[12, 60, 14.5, 1.284, 0.994],
+		[14, 100, 14.5, 1.398, 1.122],
+		[10, 60, 20, 1.264, 1.075],
+		[16, 200, 14.5, 1.507, 1.251]
+	];
+	const pairOf = (teeth: number, mates: number, pressureAngle: number) =>
+		meshed(part({ teeth, pressureAngle }), part({ teeth: mates, pressureAngle }));
+
+	test.each(pairs)('%d in %d teeth at %d degrees: %d becomes %d', (teeth, mates, angle, published, left) => {
+		const { figures } = pairOf(teeth, mates, angle);
+		expect(figures?.contactRatio).toBeCloseTo(published, 3);
+		expect(figures?.contactRatioUndercut).toBeCloseTo(left, 3);
+	});
+
+	test('the limits are judged by what is left, and both figures are told', () => {
+		const verdict = pairs.map(([teeth, mates, angle]) => {
+			const { refusals, warnings } = pairOf(teeth, mates, angle);
+			return [...codes(refusals), ...codes(warnings)].filter((code) => code !== 'undercut');
+		});
+		expect(verdict).toEqual([
+			['contact-ratio-below-one', 'contact-shortened'],
+			['contact-ratio-below-one', 'contact-shortened'],
+			['contact-ratio-low', 'contact-shortened'],
+			['contact-ratio-low', 'contact-shortened'],
+			['contact-ratio-modest', 'contact-shortened']
+		]);
+		const [told] = pairOf(14, 100, 14.5).warnings.filter(({ code }) => code === 'contact-shortened');
+		expect(told?.text).toContain('1.12 instead of 1.40');
+	});
+
+	test('a pair without undercut keeps the published figure', () => {
+		const { figures, warnings } = meshed(part(), part({ teeth: 61 }));
+		expect(figures?.contactRatioUndercut).toBe(figures?.contactRatio);
+		expect(warnings).toEqual([]);
+	});
+
+	test('undercut so deep that nothing is left to work out is refused, whichever of the two it is', () => {
+		const deep = part({ teeth: 6, pressureAngle: 14.5 });
+		const wheel = part({ teeth: 60, pressureAngle: 14.5 });
+		for (const { figures, refusals } of [meshed(deep, wheel), meshed(wheel, deep)]) {
+			expect(codes(refusals)).toEqual(['contact-not-known']);
+			expect(figures?.contactRatioUndercut).toBeNull();
+		}
+	});
+
+	test('on a rack it is what a very large wheel tends to', () => {
+		const left = (mate: Member) =>
+			meshed(part({ teeth: 14, pressureAngle: 14.5 }), mate).figures?.contactRatioUndercut;
+		const rack = left(part({ kind: 'rack', pressureAngle: 14.5 }));
+		expect(rack).toBeLessThan(1.3);
+		expect(rack).toBeCloseTo(left(part({ teeth: 5000, pressureAngle: 14.5 })) ?? NaN, 2);
+	});
+
+	test('a helical pair without undercut, and one that is undercut in its transverse plane', () => {
+		const helix = { kind: 'helical' as const, plane: 'normal' as const, helixAngle: 20, pressureAngle: 14.5 };
+		const whole = meshed(part({ ...helix, teeth: 32 }), part({ ...helix, teeth: 60 })).figures;
+		expect(whole?.contactRatioUndercut).toBe(whole?.contactRatio);
+		const cut = meshed(part({ ...helix, teeth: 14 }), part({ ...helix, teeth: 60 })).figures;
+		expect(cut?.contactRatioUndercut).toBeLessThan(cut?.contactRatio ?? NaN);
+	});
+});
+
+describe('worn tips', () => {
+	test('that leave nothing above the pitch circle end the mesh, of either member', () => {
+		const wheel = (wear: number) => part({ teeth: 48, tipWear: mm(wear) });
+		for (const wear of [4, 9, 500]) {
+			for (const pair of [
+				[part(), wheel(wear)],
+				[wheel(wear), part()]
+			] as const) {
+				expect(meshed(...pair)).toMatchObject({ figures: null, warnings: [] });
+				expect(codes(meshed(...pair).refusals)).toEqual(['tips-of-pair-worn-away']);
+			}
+		}
+		expect(codes(meshed(part(), wheel(0.5)).refusals)).toEqual([]);
+	});
+
+	test('beyond the whole depth, though a shift would leave them above the pitch circle', () => {
+		const shifted = part({ profileShift: 1.9, tipWear: mm(9.1) });
+		expect(codes(meshed(part({ teeth: 60 }), shifted).refusals)).toEqual(['tips-of-pair-worn-away']);
+	});
+
+	test('that do not reach their base circle reach no involute: no contact from nowhere', () => {
+		const [gear, mate] = [part(), part({ teeth: 48, tipWear: mm(500) })];
+		const geometry = operatingOf({ gear, mate, centreDistance: null }, unrecorded);
+		if (!geometry) throw new Error('nominal members have a distance');
+		expect(contactPath(geometry)).toBe(0);
 	});
 });
 
@@ -200,7 +296,7 @@ describe('figures', () => {
 		// The textbook form for alike members: inv αw = inv αt + 2 (x1 + x2) tan α / (N1 + N2).
 		const inv = (angle: number) => Math.tan(angle) - angle;
 		const expected = inv(radians(20)) + (2 * 0.3 * Math.tan(radians(20))) / 85;
-		expect(working.lines.find(({ symbol }) => symbol === 'invαw')?.value).toBeCloseTo(expected, 12);
+		expect(working.lines.find(({ symbol }) => symbol === 'invw')?.value).toBeCloseTo(expected, 12);
 		expect(inv(radians(figures?.operatingPressureAngle ?? NaN))).toBeCloseTo(expected, 12);
 	});
 
@@ -213,6 +309,8 @@ describe('figures', () => {
 			C0: '(4 · 61 + 4 · 24) / 2',
 			αw: 'arccos((4 · 61 · cos(20) + 4 · 24 · cos(20)) / (2 · 170.1))'
 		});
-		expect(working.lines.map(({ symbol }) => symbol)).toEqual(['i', 'C0', 'αw', 'Z', 'mp', 'jt', 'jn']);
+		expect(working.lines.map(({ symbol }) => symbol).join(' ')).toBe(
+			'i C0 αw ra1 rb1 Z1 ra2 rb2 Z2 A Zb Ze Z pb mp rw1 rw2 pw invw st1 inv1 s1 st2 inv2 s2 jt jn'
+		);
 	});
 });

@@ -115,7 +115,8 @@ describe('cannot say', () => {
 			withGear({ teeth: 10, pressureAngle: 15, profileShift: -0.5, form: { ...rack, addendum: 1.4 } })
 		],
 		['shift-too-large', withGear({ profileShift: 1.4 })],
-		['tip-worn-away', withGear({ tipWear: { value: 8, unit: 'mm' } })],
+		['tip-below-pitch-circle', withGear({ tipWear: { value: 4.5, unit: 'mm' } })],
+		['tip-worn-away', withGear({ tipWear: { value: 30, unit: 'mm' } })],
 		['rack-tip-too-round', withGear({ form: { ...rack, tipRadius: 0.5 } })],
 		['velocity-missing', withGear({ kind: 'rack', teeth: undefined })],
 		['torque-on-rack', onRack({ torque: { value: 50, unit: 'N*m' } })],
@@ -168,7 +169,7 @@ describe('end of a velocity law', () => {
 		{ finish: 'cut', cutLaw: 600, metallic: true, end: 2000 },
 		{ finish: 'hobbed', cutLaw: 1200, metallic: true, end: 4000 },
 		{ finish: 'ground', cutLaw: 1200, metallic: true, end: 10000 },
-		{ finish: 'cut', cutLaw: 1200, metallic: false, end: 6000 }
+		{ finish: 'cut', cutLaw: 1200, metallic: false, end: 3000 }
 	] as const)(
 		'$finish, cut law $cutLaw, metallic $metallic: $end ft/min',
 		({ finish, cutLaw, metallic, end }) => {
@@ -182,22 +183,36 @@ describe('end of a velocity law', () => {
 		}
 	);
 
+	const limitedTo = (finish: 'cast' | 'cut', limit: number, velocity: number): EvaluateInput => {
+		const none = { cast: null, cut: null, hobbed: null, ground: null };
+		const { teeth, module } = { teeth: base.gear.teeth ?? NaN, module: evaluate(base).module ?? NaN };
+		const rpm = (velocity * 60000) / (Math.PI * module * teeth);
+		return {
+			...base,
+			gear: { ...base.gear, finish },
+			drive: { ...base.drive, speed: { value: rpm, unit: 'rpm' } },
+			rules: { speedLimit: { ...none, [finish]: { value: limit, unit: 'm/s' as const } } }
+		};
+	};
+
+	test("the plant's own limit counts instead where it is lower", () => {
+		expect(evaluate(limitedTo('cut', 2, 1.99)).bendingMargin).not.toBeNull();
+		const beyond = evaluate(limitedTo('cut', 2, 2.01));
+		expect(beyond.bendingMargin).toBeNull();
+		expect(beyond.reasons[0]?.text).toContain('the plant allows for cut or milled teeth');
+	});
+
+	// The furthest that a text takes the law, from memory: cast 2,000 ft/min (10.16 m/s), cut 4,000 ft/min (20.32 m/s).
 	test.each([
-		{ limit: 2, carries: false },
-		{ limit: 30, carries: true }
-	])("the plant's own limit of $limit m/s counts instead", ({ limit, carries }) => {
-		const speedLimit = {
-			cast: null,
-			cut: { value: limit, unit: 'm/s' as const },
-			hobbed: null,
-			ground: null
-		};
-		const input = {
-			...withDrive({ speed: { value: carries ? 4000 : 400, unit: 'rpm' } }),
-			rules: { speedLimit }
-		};
-		const outcome = evaluate(input);
-		expect(outcome.bendingMargin !== null).toBe(carries);
-		if (!carries) expect(outcome.reasons[0]?.text).toContain('the plant allows for cut or milled teeth');
+		{ finish: 'cast', furthest: 10.16 },
+		{ finish: 'cut', furthest: 20.32 }
+	] as const)('a higher one takes the $finish law no further than any text does', ({ finish, furthest }) => {
+		expect(evaluate(limitedTo(finish, 500, furthest)).bendingMargin).not.toBeNull();
+		for (const velocity of [furthest * 1.001, 25, 400]) {
+			const outcome = evaluate(limitedTo(finish, 500, velocity));
+			expect(outcome.verdict).toBe('cannot-say');
+			expect(outcome.reasons[0]).toMatchObject({ code: 'speed-beyond-law' });
+			expect(outcome.reasons[0]?.values?.end).toBeCloseTo(furthest, 9);
+		}
 	});
 });

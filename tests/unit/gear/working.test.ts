@@ -67,6 +67,26 @@ const helical = (['normal', 'transverse'] as const).map((plane): EvaluateInput =
 	};
 });
 
+/** Undercut on both sides, an internal mate, a rack: each has lines of its own. */
+const others = (
+	[
+		{ teeth: 14, pressureAngle: 14.5, mate: { kind: 'spur', teeth: 30, profileShift: 0.1 } },
+		{ teeth: 14, pressureAngle: 20, mate: { kind: 'internal', teeth: 60, profileShift: 0.2 } },
+		{ teeth: 14, pressureAngle: 14.5, profileShift: 0.1, mate: { kind: 'rack' } }
+	] as const
+).map(({ mate, ...gear }): EvaluateInput => {
+	const [input] = checks as [EvaluateInput];
+	const thin = { toothThickness: { value: 6, unit: 'mm' as const } };
+	const thickness = mate.kind === 'rack' ? {} : thin;
+	const { centreDistance: _, toothThickness: __, teeth: ___, ...known } = knownMate;
+	return {
+		...input,
+		gear: { ...input.gear, ...gear, ...thickness },
+		mate: { ...known, ...mate },
+		original: undefined
+	};
+});
+
 /** The numbers of a line as the arithmetic they are. */
 function worth(numbers: string): number {
 	const script = numbers
@@ -78,16 +98,27 @@ function worth(numbers: string): number {
 		.replaceAll('^', '**')
 		.replaceAll('∞', 'Infinity')
 		.replace(/\barccos\(/g, '(180 / Math.PI) * Math.acos(')
+		.replace(/\barctan\(/g, '(180 / Math.PI) * Math.atan(')
+		.replace(/\btan\(([^()]+)\)/g, 'Math.tan(($1) * Math.PI / 180)')
 		.replace(/\bcos\(([^()]+)\)/g, 'Math.cos(($1) * Math.PI / 180)')
 		.replace(/\bsin\(([^()]+)\)/g, 'Math.sin(($1) * Math.PI / 180)')
 		.replace(/\b(min|max)\(/g, 'Math.$1(');
 	return new Function(`return ${script};`)() as number;
 }
 
+/** Six digits are shown of every term; a difference has the error of its terms. */
+function sizeOf(numbers: string, value: number): number {
+	const [, first] = /^\(?([\d.]+) - /.exec(numbers) ?? [];
+	if (first) return Number(first);
+	const [, minuend = '1', subtrahend = '0'] = /max\(0, ([\d.]+) - ([\d.]+)\) ·/.exec(numbers) ?? [];
+	const lost = Number(minuend) / Math.max(Number(minuend) - Number(subtrahend), 1e-9);
+	return Math.max(Math.abs(value) * lost, 0.01);
+}
+
 const isArithmetic = ({ expression }: WorkingLine) =>
 	expression !== 'as given' && !expression.startsWith('table') && !expression.startsWith('from the');
 
-describe.each([...checks, ...helical])(
+describe.each([...checks, ...helical, ...others])(
 	'$drive.load $gear.finish, metallic $gear.material.metallic',
 	(input) => {
 		const { working, ...outcome } = evaluate(input);
@@ -107,9 +138,7 @@ describe.each([...checks, ...helical])(
 			const lines = working.filter(isArithmetic);
 			expect(lines.length).toBeGreaterThan(25);
 			for (const { numbers, value } of lines) {
-				// Six digits are shown of every term; a difference has the error of its first.
-				const size = /^[\d.]+ - /.test(numbers) ? parseFloat(numbers) : Math.max(Math.abs(value), 0.01);
-				expect(Math.abs(worth(numbers) - value), numbers).toBeLessThanOrEqual(2e-5 * size);
+				expect(Math.abs(worth(numbers) - value), numbers).toBeLessThanOrEqual(2e-5 * sizeOf(numbers, value));
 			}
 		});
 
@@ -121,6 +150,42 @@ describe.each([...checks, ...helical])(
 		});
 	}
 );
+
+describe('no figure appears from nowhere', () => {
+	/** Readings and tables, and the names that all lines of one kind share. */
+	const GIVEN =
+		/^(m|m1|m2|mn|N|N1|N2|x|x1|x2|ha|hf|ρ|w|d|d1|d2|α|α1|α2|αn|αn1|αn2|αt|β|βb|r1|C|sn|φ|uF|uL|un|z|π|ν1|ν2|E1|E2|F|HB1|HB2)$/;
+	const symbols = (expression: string) =>
+		[...expression.matchAll(/\p{L}[\p{L}\p{Nd}]*/gu)].map(([symbol]) => symbol);
+	const FUNCTION = /^(cos|sin|tan|arccos|arctan|min|max)$/;
+
+	test.each([
+		['measured pair', checks[0]],
+		['helical pair', helical[0]],
+		['undercut pair', others[0]],
+		['internal pair', others[1]],
+		['rack', others[2]]
+	])('%s: path of contact, flanks and backlash', (_name, input) => {
+		const { working } = evaluate(input as EvaluateInput);
+		const told = new Set(working.map(({ symbol }) => symbol));
+		const traced = working.filter(({ symbol }) =>
+			/^(Z|Ze|Zb|Zu|Z1|Z2|A|h|e|mp|mu|pb|cr|jt|jn|pw|s1|s2|rw1|rw2|invw|ke|Kf)$/.test(symbol)
+		);
+		expect(traced.length).toBeGreaterThan(8);
+		for (const { expression } of traced) {
+			for (const symbol of symbols(expression)) {
+				if (FUNCTION.test(symbol) || GIVEN.test(symbol) || expression.startsWith('from')) continue;
+				expect(told, `${symbol} of ${expression}`).toContain(symbol);
+			}
+		}
+	});
+
+	test('a helical pair tells its transverse angle, a pair of shifts the angle and distance that they make', () => {
+		const told = evaluate(helical[0] as EvaluateInput).working.map(({ symbol }) => symbol);
+		for (const symbol of ['αt', 'inv1', 'inv2', 'invw', 'αw', 'C', 'r1', 'r2', 'rf'])
+			expect(told).toContain(symbol);
+	});
+});
 
 test('between table entries the working shows the interpolation, up to the rack', () => {
 	const lineFor = (teeth: number) =>

@@ -66,11 +66,22 @@ function meshRows({ mesh }: Outcome, metric: boolean, { t, language }: Words): F
 		...row(t('figures.contact-ratio'), mesh.contactRatio + mesh.overlapRatio, (value) =>
 			fixed(value, 2, language)
 		),
+		...row(t('figures.contact-ratio-undercut'), shortened(mesh), (value) => fixed(value, 2, language)),
 		...row(t('figures.backlash'), mesh.normalBacklash, length),
 		{ label: t('figures.hunting'), value: yesNo(mesh.huntingTooth) },
 		{ label: t('figures.undercut'), value: yesNo(mesh.undercut.gear || mesh.undercut.mate) },
 		{ label: t('figures.interference'), value: yesNo(mesh.interference) }
 	];
+}
+
+/** Contact ratio where the roots take something from it: told beside the published one, and judged. */
+function shortened({
+	contactRatio,
+	contactRatioUndercut,
+	overlapRatio
+}: NonNullable<Outcome['mesh']>): number | null {
+	if (contactRatioUndercut === null || contactRatioUndercut >= contactRatio) return null;
+	return contactRatioUndercut + overlapRatio;
 }
 
 function row(label: string, value: number | null | undefined, shown: (value: number) => string): FigureRow[] {

@@ -50,6 +50,9 @@ function numberWords(name: string, value: number, { language }: Words): string {
 		case 'least':
 		case 'most':
 		case 'contactRatio':
+		case 'left':
+		case 'whole':
+		case 'wear':
 			return fixed(value, 2, language);
 		case 'velocity':
 		case 'end':

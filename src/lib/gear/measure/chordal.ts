@@ -2,6 +2,7 @@
  * What a gear-tooth vernier reads, and other chords across teeth. Lengths in mm, angles in radians; spur gears, or the
  * normal plane of a helical one by its virtual teeth.
  */
+import { nominalThickness } from '../thickness';
 
 export interface ChordalGear {
 	teeth: number;
@@ -22,7 +23,7 @@ export interface ChordalGear {
 export function chordal(gear: ChordalGear): { thickness: number; addendum: number } {
 	const { teeth, module, profileShift, pressureAngle, addendum } = gear;
 	const d = module * teeth;
-	const half = (Math.PI / 2 + 2 * profileShift * Math.tan(pressureAngle)) / teeth;
+	const half = nominalThickness(1, profileShift, pressureAngle) / teeth;
 	return {
 		thickness: d * Math.sin(half),
 		addendum: (addendum + profileShift) * module + (d / 2) * (1 - Math.cos(half))

@@ -6,6 +6,7 @@ import { baseDiameter, tipDiameter, type Member } from '../member';
 import { straightDepth } from '../rack';
 import { arcThickness } from '../thickness';
 import { involute } from '../involute';
+import { basePitch } from './span';
 
 /** Between which lengths from where the base tangent leaves the base circle a flank lies, in the transverse plane, mm. */
 export interface Flank {
@@ -85,7 +86,7 @@ export function spansOnFlank(member: Member): { fewest: number; most: number } |
 		transverseAngle: angle,
 		helixAngle: member.helixAngle
 	});
-	const pitch = Math.PI * transverseModule * Math.cos(angle);
+	const pitch = basePitch(transverseModule, angle);
 	const thickness = base * (arcThickness(member) / d + involute(angle));
 	const over = (half: number) => ((2 * half) / baseHelixCosine ** 2 - thickness) / pitch + 1;
 	const fewest = Math.max(2, Math.ceil(over(from) - ROUNDING));

@@ -38,6 +38,10 @@ export const checkPage = {
 	'figures.centre': ['Standard centre distance', 'Distancia entre centros estándar'],
 	'figures.angle': ['Operating pressure angle', 'Ángulo de presión de trabajo'],
 	'figures.contact-ratio': ['Contact ratio', 'Relación de contacto'],
+	'figures.contact-ratio-undercut': [
+		'Contact ratio that the roots leave',
+		'Relación de contacto que dejan las raíces'
+	],
 	'figures.backlash': ['Backlash across the flanks', 'Juego entre los flancos'],
 	'figures.hunting': ['Every tooth meets every other', 'Cada diente se junta con todos'],
 	'figures.undercut': ['Undercut', 'Socavado'],

@@ -227,6 +227,30 @@ export const reasons = {
 		'The wear limit holds for a mean Brinell hardness of {from} to {to}; of this pair it is {brinell}. Check both hardnesses, or have the wear judged by an engineer.',
 		'El límite de desgaste vale para una dureza Brinell media de {from} a {to}; la de este par es {brinell}. Revise ambas durezas, o pida a un ingeniero que juzgue el desgaste.'
 	],
+	'reason.contact-shortened': [
+		'The roots shorten the contact: the flanks begin so high that the contact ratio is {left} instead of {whole}.',
+		'Las raíces acortan el contacto: los flancos empiezan tan arriba que la relación de contacto es {left} en vez de {whole}.'
+	],
+	'reason.contact-not-known': [
+		'The teeth of one of the two are undercut so deep that no flank is left below its pitch circle: what contact remains cannot be worked out. Check counts, angle and shifts of both, or have the pair rated by an engineer.',
+		'Los dientes de uno de los dos están tan socavados que no queda flanco bajo su círculo de paso: no se puede calcular qué contacto queda. Revise conteos, ángulo y correcciones de ambos, o pida a un ingeniero que evalúe el par.'
+	],
+	'reason.tips-worn': [
+		'The tips of this gear are worn by {wear} mm. It is given the strength of unworn teeth, never more; what has worn the tips may have worn the flanks too. An engineer should review it.',
+		'Las puntas de este engrane están gastadas {wear} mm. Se le da la resistencia de dientes sin desgaste, nunca más; lo que gastó las puntas pudo gastar también los flancos. Un ingeniero debe revisarlo.'
+	],
+	'reason.mate-tips-worn': [
+		'The tips of the mate are worn by {wear} mm. It is given the strength of unworn teeth, never more; what has worn the tips may have worn the flanks too. An engineer should review it.',
+		'Las puntas del conjugado están gastadas {wear} mm. Se le da la resistencia de dientes sin desgaste, nunca más; lo que gastó las puntas pudo gastar también los flancos. Un ingeniero debe revisarlo.'
+	],
+	'reason.tip-below-pitch-circle': [
+		'The tips of these teeth do not stand above the pitch circle: the Lewis method does not hold for such stubs. Check the wear of the tips, the addendum and the profile shift.',
+		'Las puntas de estos dientes no sobresalen del círculo de paso: el método de Lewis no vale para muñones así. Revise el desgaste de las puntas, el adendo y la corrección de perfil.'
+	],
+	'reason.tips-of-pair-worn-away': [
+		'The tips of the gear or of its mate are worn down to the pitch circle or below: no mesh is left to work out. Check the wear of the tips of both.',
+		'Las puntas del engrane o de su conjugado están gastadas hasta el círculo de paso o más abajo: no queda engrane que calcular. Revise el desgaste de las puntas de ambos.'
+	],
 	'reason-short.material-not-permitted': [
 		"{material} is not on the plant's list",
 		'{material} no está en la lista de la planta'
@@ -269,5 +293,10 @@ export const reasons = {
 	'reason-short.contact-ratio-below-one': ['Contact ratio below 1', 'Relación de contacto menor que 1'],
 	'reason-short.undercut-too-deep': ['Undercut too deep', 'Socavado demasiado profundo'],
 	'reason-short.tooth-pointed': ['Pointed teeth', 'Dientes en punta'],
-	'reason-short.tip-worn-away': ['Tips worn away', 'Puntas gastadas']
+	'reason-short.tip-worn-away': ['Tips worn away', 'Puntas gastadas'],
+	'reason-short.tip-below-pitch-circle': ['Tips worn to stubs', 'Puntas reducidas a muñones'],
+	'reason-short.tips-of-pair-worn-away': ['Tips of the pair worn away', 'Puntas del par gastadas'],
+	'reason-short.tips-worn': ['Tips worn: {wear} mm', 'Puntas gastadas: {wear} mm'],
+	'reason-short.mate-tips-worn': ["Mate's tips worn: {wear} mm", 'Puntas del conjugado gastadas: {wear} mm'],
+	'reason-short.contact-not-known': ['Undercut too deep to mesh', 'Socavado demasiado profundo para engranar']
 } as const satisfies Record<string, readonly [string, string]>;

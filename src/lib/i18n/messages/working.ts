@@ -137,10 +137,6 @@ export const working = {
 		'involute of the operating pressure angle, by the shifts',
 		'involuta del ángulo de presión de operación, por las correcciones'
 	],
-	"working.path of contact, from where it leaves the pinion's base circle": [
-		"path of contact, from where it leaves the pinion's base circle",
-		'línea de contacto, desde donde deja el círculo base del piñón'
-	],
 	'working.contact ratio, path of contact over base pitch': [
 		'contact ratio, path of contact over base pitch',
 		'relación de contacto, línea de contacto entre paso base'
@@ -192,12 +188,163 @@ export const working = {
 		'capacidad a desgaste, repuesto entre original'
 	],
 	'working.measurement over two pins': ['measurement over two pins', 'medida sobre dos rodillos'],
+	'working.tip radius of the pinion': ['tip radius of the pinion', 'radio de punta del piñón'],
+	'working.base radius of the pinion': ['base radius of the pinion', 'radio base del piñón'],
+	'working.from the base circle to the tips of the pinion, along the line of action': [
+		'from the base circle to the tips of the pinion, along the line of action',
+		'del círculo base a las puntas del piñón, sobre la línea de acción'
+	],
+	'working.radius where the flank begins of the pinion': [
+		'radius where the flank begins of the pinion',
+		'radio donde empieza el flanco del piñón'
+	],
+	'working.from the base circle to where the flank begins of the pinion, along the line of action': [
+		'from the base circle to where the flank begins of the pinion, along the line of action',
+		'del círculo base al inicio del flanco del piñón, sobre la línea de acción'
+	],
+	'working.operating pitch radius of the pinion': [
+		'operating pitch radius of the pinion',
+		'radio de paso de trabajo del piñón'
+	],
+	'working.arc thickness on the reference circle of the pinion': [
+		'arc thickness on the reference circle of the pinion',
+		'espesor de arco en el círculo de referencia del piñón'
+	],
+	'working.arc thickness on the operating pitch circle of the pinion': [
+		'arc thickness on the operating pitch circle of the pinion',
+		'espesor de arco en el círculo de paso de trabajo del piñón'
+	],
+	"working.involute of the pinion's pressure angle": [
+		"involute of the pinion's pressure angle",
+		'involuta del ángulo de presión del piñón'
+	],
+	"working.radius of the pinion's flank at the pitch point": [
+		"radius of the pinion's flank at the pitch point",
+		'radio del flanco del piñón en el punto de paso'
+	],
+	'working.tip radius of the wheel': ['tip radius of the wheel', 'radio de punta de la rueda'],
+	'working.base radius of the wheel': ['base radius of the wheel', 'radio base de la rueda'],
+	'working.from the base circle to the tips of the wheel, along the line of action': [
+		'from the base circle to the tips of the wheel, along the line of action',
+		'del círculo base a las puntas de la rueda, sobre la línea de acción'
+	],
+	'working.radius where the flank begins of the wheel': [
+		'radius where the flank begins of the wheel',
+		'radio donde empieza el flanco de la rueda'
+	],
+	'working.from the base circle to where the flank begins of the wheel, along the line of action': [
+		'from the base circle to where the flank begins of the wheel, along the line of action',
+		'del círculo base al inicio del flanco de la rueda, sobre la línea de acción'
+	],
+	'working.operating pitch radius of the wheel': [
+		'operating pitch radius of the wheel',
+		'radio de paso de trabajo de la rueda'
+	],
+	'working.arc thickness on the reference circle of the wheel': [
+		'arc thickness on the reference circle of the wheel',
+		'espesor de arco en el círculo de referencia de la rueda'
+	],
+	'working.arc thickness on the operating pitch circle of the wheel': [
+		'arc thickness on the operating pitch circle of the wheel',
+		'espesor de arco en el círculo de paso de trabajo de la rueda'
+	],
+	"working.involute of the wheel's pressure angle": [
+		"involute of the wheel's pressure angle",
+		'involuta del ángulo de presión de la rueda'
+	],
+	"working.radius of the wheel's flank at the pitch point": [
+		"radius of the wheel's flank at the pitch point",
+		'radio del flanco de la rueda en el punto de paso'
+	],
+	'working.involute of the operating pressure angle': [
+		'involute of the operating pressure angle',
+		'involuta del ángulo de presión de trabajo'
+	],
+	'working.line of action between the base circles': [
+		'line of action between the base circles',
+		'línea de acción entre los círculos base'
+	],
+	"working.pitch point, from where the line of action leaves the pinion's base circle": [
+		"pitch point, from where the line of action leaves the pinion's base circle",
+		'punto de paso, desde donde la línea de acción deja el círculo base del piñón'
+	],
+	"working.where contact begins, from where the line of action leaves the pinion's base circle": [
+		"where contact begins, from where the line of action leaves the pinion's base circle",
+		'inicio del contacto, desde donde la línea de acción deja el círculo base del piñón'
+	],
+	"working.where contact ends, from where the line of action leaves the pinion's base circle": [
+		"where contact ends, from where the line of action leaves the pinion's base circle",
+		'fin del contacto, desde donde la línea de acción deja el círculo base del piñón'
+	],
+	'working.path of contact': ['path of contact', 'línea de contacto'],
+	'working.base pitch': ['base pitch', 'paso base'],
+	'working.path of contact between the beginnings of the flanks': [
+		'path of contact between the beginnings of the flanks',
+		'línea de contacto entre los inicios de los flancos'
+	],
+	'working.contact ratio between the beginnings of the flanks: it is judged': [
+		'contact ratio between the beginnings of the flanks: it is judged',
+		'relación de contacto entre los inicios de los flancos: es la que se juzga'
+	],
+	"working.from the pinion's rolling circle to the rack's tips": [
+		"from the pinion's rolling circle to the rack's tips",
+		'del círculo de rodadura del piñón a las puntas de la cremallera'
+	],
+	"working.from the pinion's rolling circle to the rack's reference line": [
+		"from the pinion's rolling circle to the rack's reference line",
+		'del círculo de rodadura del piñón a la línea de referencia de la cremallera'
+	],
+	"working.thickness of the pinion's teeth on its rolling circle": [
+		"thickness of the pinion's teeth on its rolling circle",
+		'espesor de los dientes del piñón en su círculo de rodadura'
+	],
+	'working.transverse pressure angle': ['transverse pressure angle', 'ángulo de presión transversal'],
+	'working.operating pressure angle, by the shifts': [
+		'operating pressure angle, by the shifts',
+		'ángulo de presión de trabajo, por las correcciones'
+	],
+	'working.centre distance without backlash, by the shifts': [
+		'centre distance without backlash, by the shifts',
+		'distancia entre centros sin juego, por las correcciones'
+	],
+	'working.pitch on the operating pitch circle': [
+		'pitch on the operating pitch circle',
+		'paso en el círculo de paso de trabajo'
+	],
+	'working.least radius of the fillet, in modules': [
+		'least radius of the fillet, in modules',
+		'radio mínimo del filete, en módulos'
+	],
+	'working.face width at the bad end, standard uncertainties below': [
+		'face width at the bad end, standard uncertainties below',
+		'ancho de cara en el extremo malo, incertidumbres típicas por debajo'
+	],
+	'working.load at the bad end, standard uncertainties above': [
+		'load at the bad end, standard uncertainties above',
+		'carga en el extremo malo, incertidumbres típicas por encima'
+	],
+	'working.speed at the bad end, standard uncertainties off': [
+		'speed at the bad end, standard uncertainties off',
+		'velocidad en el extremo malo, incertidumbres típicas de diferencia'
+	],
+	'working.operating pressure angle, that of the teeth': [
+		'operating pressure angle, that of the teeth',
+		'ángulo de presión de trabajo, el de los dientes'
+	],
 	'working.span over k teeth': ['span over k teeth', 'medida sobre k dientes'],
 
 	'expression.as given': ['as given', 'como se dio'],
 	'expression.table at N': ['table at N', 'tabla en N'],
 	'expression.table, rack': ['table, rack', 'tabla, cremallera'],
 	'expression.from the generated tooth': ['from the generated tooth', 'del diente generado'],
+	'expression.from the point of the least margin': [
+		'from the point of the least margin',
+		'del punto de menor margen'
+	],
+	'expression.from the involute: tan(αw) - π · αw / 180 = invw': [
+		'from the involute: tan(αw) - π · αw / 180 = invw',
+		'de la involuta: tan(αw) - π · αw / 180 = invw'
+	],
 
 	'source.as given': ['as given', 'como se dio'],
 	'source.definition': ['definition', 'definición'],
@@ -214,6 +361,7 @@ export const working = {
 		'factor de velocidad de engranes no metálicos'
 	],
 	'source.Lewis bending stress': ['Lewis bending stress', 'esfuerzo de flexión de Lewis'],
+	'source.first-order reliability': ['first-order reliability', 'fiabilidad de primer orden'],
 	'source.first-order propagation': ['first-order propagation', 'propagación de primer orden'],
 	'source.95 % one-sided, normal distribution': [
 		'95 % one-sided, normal distribution',
