@@ -1,11 +1,14 @@
 /** The outcome of a check whose gear is chosen, left open, or fits nothing: the weakest decides, a doubt is told. */
 import { describe, expect, it } from 'vitest';
+import type { IdentifyReading } from '$lib/gear/identify/contract';
 import { evaluate } from '$lib/gear/evaluate';
 import { answerCheck, answerWithQuestion } from '$lib/records/answer-check';
 import { assemble, type PlantSide } from '$lib/records/assemble';
 import { noAnswers, type CheckAnswers } from '$lib/records/check';
 import { outcome as outcomeSchema } from '$lib/records/outcome';
 import type { MaterialStatement } from '$lib/records/material';
+import { cycloidalReadings } from '../../identify/cycloidal-gears';
+import { randomOf } from '../../identify/synthetic-gears';
 
 const NOW = '2026-06-01T10:00:00.000Z';
 const material: MaterialStatement = {
@@ -99,12 +102,18 @@ describe('a check that is left open between several gears', () => {
 	});
 
 	it('cannot be answered where no involute gear fits', () => {
-		const spans: CheckAnswers['spans'] = [
-			{ teeth: 3, reading: reading(1.2, 'in') },
-			{ teeth: 4, reading: reading(2.4, 'in') },
-			{ teeth: 5, reading: reading(2.9, 'in') }
-		];
-		const { outcome: none } = answerWithQuestion({ ...open, spans }, plantSide, NOW);
+		// A cast wheel with cycloidal teeth, as it was read.
+		const wheel = cycloidalReadings(randomOf(3));
+		const inches = (read: IdentifyReading | undefined) => reading(read?.value ?? 0, 'in' as const);
+		const answers: CheckAnswers = {
+			...open,
+			teeth: reading(wheel.teeth, 'teeth'),
+			outsideDiameter: inches(wheel.outsideDiameter),
+			outsideDiameterTaken: 'pi-tape',
+			wholeDepth: inches(wheel.wholeDepth),
+			spans: (wheel.spans ?? []).map((span) => ({ teeth: span.teeth, reading: inches(span) }))
+		};
+		const none = answerCheck(answers, plantSide, NOW);
 		expect(none).toMatchObject({ verdict: 'cannot-say', reasons: [{ code: 'no-gear-fits' }] });
 	});
 
