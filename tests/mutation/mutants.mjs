@@ -14,6 +14,12 @@ export const FORMULA_FILES = [
 	'measure/span.ts'
 ];
 
+/**
+ * Files that hold formulas among other things: of these the terms of each step of the working, and the numbers that
+ * are reckoned with.
+ */
+export const MIXED_FILES = ['wear.ts', 'figures.ts', 'member.ts', 'pair-law.ts'];
+
 /** By how much a factor is changed: more than the rounding of any published value that the tests hold. */
 const CHANGE = 1.05;
 
@@ -24,11 +30,11 @@ const CHANGE = 1.05;
  * @returns {Mutant[]}
  */
 export function mutantsOf(folder) {
-	return FORMULA_FILES.flatMap((file) => {
+	return [...FORMULA_FILES, ...MIXED_FILES].flatMap((file) => {
 		const path = join(folder, file);
 		const source = readFileSync(path, 'utf8');
 		const tree = ts.createSourceFile(path, source, ts.ScriptTarget.Latest, true);
-		return placesIn(tree).map(({ start, end }) => {
+		return placesIn(tree, MIXED_FILES.includes(file)).map(({ start, end }) => {
 			const term = source.slice(start, end);
 			return {
 				file: path,
@@ -40,8 +46,11 @@ export function mutantsOf(folder) {
 	});
 }
 
-/** @param {ts.SourceFile} tree */
-function placesIn(tree) {
+/**
+ * @param {ts.SourceFile} tree
+ * @param {boolean} mixed
+ */
+function placesIn(tree, mixed) {
 	/** @type {{ start: number, end: number }[]} */
 	const places = [];
 	/**
@@ -50,9 +59,10 @@ function placesIn(tree) {
 	 */
 	function visit(node, terms) {
 		let inside = terms;
-		if (ts.isArrowFunction(node)) inside = new Set([...terms, ...node.parameters.flatMap(namesOf)]);
+		if (ts.isArrowFunction(node) && (!mixed || isOfStep(node)))
+			inside = new Set([...terms, ...node.parameters.flatMap(namesOf)]);
 		const counted =
-			(ts.isNumericLiteral(node) && isFigure(node)) ||
+			(ts.isNumericLiteral(node) && isFigure(node) && (!mixed || isReckonedWith(node))) ||
 			(ts.isIdentifier(node) && inside.has(node.text) && isUse(node));
 		if (counted) places.push({ start: node.getStart(tree), end: node.getEnd() });
 		// Types and the places where a name is introduced hold no figure.
@@ -70,6 +80,34 @@ function namesOf({ name }) {
 	return name.elements.flatMap((element) =>
 		ts.isBindingElement(element) && ts.isIdentifier(element.name) ? [element.name.text] : []
 	);
+}
+
+/**
+ * What computes the figure of a line of the working.
+ * @param {ts.ArrowFunction} node
+ */
+function isOfStep(node) {
+	const { parent } = node;
+	return (
+		ts.isCallExpression(parent) &&
+		ts.isPropertyAccessExpression(parent.expression) &&
+		parent.expression.name.text === 'step' &&
+		parent.arguments[2] === node
+	);
+}
+
+/**
+ * A constant, or a number in arithmetic; a tolerance for what arithmetic rounds is no figure.
+ * @param {ts.NumericLiteral} node
+ */
+function isReckonedWith({ parent, text }) {
+	if (Number(text) < 1e-6) return false;
+	return ts.isVariableDeclaration(parent) || (ts.isBinaryExpression(parent) && isArithmetic(parent));
+}
+
+/** @param {ts.BinaryExpression} expression */
+function isArithmetic({ operatorToken }) {
+	return ['+', '-', '*', '/', '**'].includes(operatorToken.getText());
 }
 
 /**

@@ -19,7 +19,7 @@ export default {
 	test: {
 		include: [
 			'tests/reference/{velocity-laws,worked-examples,wear,measuring,mesh}.test.ts',
-			'tests/unit/gear/{docstring-examples,pair,verdict,capacity,working}.test.ts'
+			'tests/unit/gear/{docstring-examples,member,pair*,verdict,capacity,working,wear}.test.ts'
 		],
 		environment: 'node',
 		pool: 'threads',

@@ -4,6 +4,7 @@
  */
 import type { EvaluateInput, LimitName, Outcome, Reason } from './contract';
 import { figuresOf, type FiguresAnswer } from './figures';
+import type { PairLaws } from './pair-law';
 import { SOURCES } from './sources';
 import { unrecorded, type Recorder } from './working';
 
@@ -67,10 +68,16 @@ function ratio(answer: LimitName, spare: FiguresAnswer, original: FiguresAnswer)
 	const spares = powerOf(spareForce, spare);
 	const originals = powerOf(originalForce, original);
 	if (spares !== null && originals !== null) return finite({ spares, originals });
-	// Without a speed: the same law on the same pitch circle has the same factor, whatever the speed.
-	const same = spare.law === original.law && spare.figures.pitchDiameter === original.figures.pitchDiameter;
+	// Without a speed: the same laws on the same pitch circle have the same factor, whatever the speed.
+	const same =
+		haveSameLaws(spare.laws, original.laws) && spare.figures.pitchDiameter === original.figures.pitchDiameter;
 	const known = spare.figures.pitchLineVelocity !== null;
 	return same && !known ? finite({ spares: spareForce, originals: originalForce }) : null;
+}
+
+function haveSameLaws(one: PairLaws, other: PairLaws): boolean {
+	const names = (laws: PairLaws) => [...new Set(laws.map((member) => member?.law))].sort().join();
+	return names(one) === names(other);
 }
 
 function powerOf(force: number, { figures }: FiguresAnswer): number | null {

@@ -203,6 +203,7 @@ export interface Outcome {
 	diametralPitch: number | null;
 	circularPitch: number | null;
 	pitchLineVelocity: number | null;
+	/** Of the pair: the mate's where it gives the higher factor; null where that hangs on a velocity that is not known. */
 	velocityLaw: string | null;
 	velocityFactor: number | null;
 	formFactor: number | null;

@@ -1,44 +1,48 @@
-/** The drive on a member's pitch line: velocity, velocity factor with its law, tangential and design force. */
-import type { Drive, Gear, Outcome, Reason, Rules } from './contract';
+/** The drive on a pair's pitch line: velocity, velocity factor with its law, tangential and design force. */
+import type { Drive, Gear, Mate, Outcome, Reason, Rules } from './contract';
 import { designForce, tangentialForce } from './load';
 import type { Member } from './member';
+import { firstToEnd, harsherLaw, lawsOf, onlyLaw, pairVelocityFactor, type PairLaws } from './pair-law';
 import { speedRefusal } from './refusals';
-import {
-	barthVelocityFactor,
-	pitchLineVelocity,
-	velocityEnd,
-	velocityLawOf,
-	type VelocityLaw
-} from './velocity';
+import { pitchLineVelocity, type VelocityLaw } from './velocity';
 import type { Recorder } from './working';
 
 export type DriveFigures = Pick<
 	Outcome,
 	'pitchLineVelocity' | 'velocityFactor' | 'tangentialForce' | 'designForce'
-> & { velocityLaw: VelocityLaw };
+> & { velocityLaw: VelocityLaw | null };
+
+export interface DriveAnswer {
+	figures: DriveFigures;
+	laws: PairLaws;
+	/** The law that counts is the mate's, not this gear's own. */
+	byMate: boolean;
+	refusal: Reason | null;
+}
 
 /** Velocities in m/s, forces in N; what the input does not allow is null. */
 export function driveOf(
-	gear: Gear,
+	{ gear, mate, drive }: { gear: Gear; mate?: Mate | undefined; drive: Drive },
 	member: Member,
-	{ drive, rules }: { drive: Drive; rules: Rules },
+	rules: Rules,
 	recorder: Recorder
-): { figures: DriveFigures; refusal: Reason | null } {
+): DriveAnswer {
 	const velocity = velocityOf(drive, member, recorder);
 	const force = tangentialForce(drive.load, member.pitchDiameter, velocity, recorder);
-	const law = velocityLawOf(gear.finish, gear.material.metallic, rules.cutLaw);
-	const end = velocityEnd(law, gear.finish, rules.speedLimit);
-	const byPlant = rules.speedLimit[gear.finish] !== null;
-	const refusal =
-		velocity === null ? null : speedRefusal(velocity, end, { law, finish: gear.finish, byPlant });
+	const laws = lawsOf(gear, mate, rules);
+	const refusal = velocity === null ? null : speedRefusal(velocity, firstToEnd(laws));
+	const known = velocity !== null && !refusal;
+	const counts = known ? harsherLaw(velocity, laws) : null;
 	return {
 		figures: {
 			pitchLineVelocity: velocity,
 			tangentialForce: force,
 			designForce: force === null ? null : designForce(force, drive.serviceFactor, recorder),
-			velocityLaw: law,
-			velocityFactor: velocity === null || refusal ? null : barthVelocityFactor(velocity, law, recorder)
+			velocityLaw: counts?.law ?? onlyLaw(laws),
+			velocityFactor: known ? pairVelocityFactor(velocity, laws, recorder) : null
 		},
+		laws,
+		byMate: counts?.of === 'mate',
 		refusal
 	};
 }

@@ -24,7 +24,8 @@ export function evaluate(input: EvaluateInput): Outcome {
 		limits: figures.limits,
 		refusals: overflowed ? [...answer.refusals, OUT_OF_RANGE] : answer.refusals,
 		reviews: [...answer.reviews, ...tipWearReviews(input)],
-		warnings: [...compared, ...answer.warnings]
+		warnings: [...compared, ...answer.warnings],
+		scope: answer.scope
 	});
 	return {
 		core: CORE_VERSION,

@@ -5,17 +5,17 @@
  */
 import type { EvaluateInput, Gear, Limit, LimitName, Mate, Outcome, Reason, Rules } from './contract';
 import { permittedForce, permittedPowerOf, permittedTorqueOf } from './bending';
-import { driveOf, type DriveFigures } from './drive';
+import { driveOf, type DriveAnswer } from './drive';
 import { memberOf } from './member';
 import { pairOf } from './pair';
+import { pairUncertainty, type PairLaws } from './pair-law';
 import { circularPitchOf, diametralPitchOf, pitchDiameter } from './pitch';
-import { kindReview, missingRefusals } from './refusals';
+import { kindReview, mateLawTold, missingRefusals } from './refusals';
 import { rulesOf, uncertaintyOf } from './rules';
 import { SOURCES } from './sources';
 import { formFactorOf, memberBending } from './strength';
-import { isPower, lowEnd, marginUncertainty, type MarginUncertainty } from './uncertainty';
-import { velocityFactorShare, type VelocityLaw } from './velocity';
-import type { LineHead, Recorder } from './working';
+import { isPower, lowEnd, type MarginUncertainty } from './uncertainty';
+import type { Recorder } from './working';
 
 /** The part of the outcome that is worked out here; names and units as there. */
 export type Figures = Omit<Outcome, 'core' | 'original' | 'verdict' | 'reasons' | 'remedies' | 'working'>;
@@ -58,7 +58,7 @@ export interface Strength {
 
 export interface FiguresAnswer {
 	figures: Figures;
-	law: VelocityLaw;
+	laws: PairLaws;
 	strengths: Strength[];
 	uncertainty: MarginUncertainty | null;
 	/** Make it `cannot-say`. */
@@ -67,6 +67,8 @@ export interface FiguresAnswer {
 	reviews: Reason[];
 	/** Are told, and change no verdict. */
 	warnings: Reason[];
+	/** What a verdict does not cover. */
+	scope: Reason[];
 }
 
 export function figuresOf(input: EvaluateInput, recorder: Recorder): FiguresAnswer {
@@ -82,8 +84,8 @@ export function figuresOf(input: EvaluateInput, recorder: Recorder): FiguresAnsw
 		pitchDiameter:
 			member.teeth === null ? null : pitchDiameter(member.transverseModule, member.teeth, recorder)
 	};
-	const onPitchLine = driveOf(gear, member, { drive, rules }, recorder);
-	const { velocityFactor, designForce } = onPitchLine.figures;
+	const onPitchLine = driveOf(input, member, rules, recorder);
+	const { velocityFactor, velocityLaw, designForce } = onPitchLine.figures;
 	const hasTeeth = gear.kind === 'rack' || member.teeth !== null;
 	const form = hasTeeth ? formFactorOf(member, gear.form, rules.formFactor, recorder) : null;
 
@@ -108,15 +110,17 @@ export function figuresOf(input: EvaluateInput, recorder: Recorder): FiguresAnsw
 		...bending.figures,
 		...pair.figures
 	};
-	const uncertainty = uncertaintyAt(input, onPitchLine.figures, recorder);
+	const uncertainty = uncertaintyAt(input, onPitchLine, recorder);
+	// Of two that do not mesh nothing is carried, so no answer can decide.
+	const meshes = pair.refusals.length === 0;
 	const review = kindReview(gear.kind, mate?.kind);
 	return {
 		figures: {
 			...figures,
-			...marginsOf(figures, rules, uncertainty, recorder),
-			...permittedOf(strengths, figures, drive.serviceFactor, recorder)
+			...marginsOf(figures, { rules, meshes, uncertainty }, recorder),
+			...(meshes && permittedOf(strengths, figures, drive.serviceFactor, recorder))
 		},
-		law: onPitchLine.figures.velocityLaw,
+		laws: onPitchLine.laws,
 		strengths,
 		uncertainty,
 		refusals: [
@@ -125,29 +129,30 @@ export function figuresOf(input: EvaluateInput, recorder: Recorder): FiguresAnsw
 			...[onPitchLine.refusal, form?.refusal ?? null].filter((reason) => reason !== null)
 		],
 		reviews: review ? [review, ...pair.reviews] : pair.reviews,
-		warnings: pair.warnings
+		warnings:
+			onPitchLine.byMate && velocityLaw ? [...pair.warnings, mateLawTold(velocityLaw)] : pair.warnings,
+		scope: pair.scope
 	};
 }
 
 function uncertaintyAt(
 	{ drive, uncertainty }: EvaluateInput,
-	{ pitchLineVelocity, velocityFactor, velocityLaw }: DriveFigures,
+	{ figures: { pitchLineVelocity, velocityFactor }, laws }: DriveAnswer,
 	recorder: Recorder
 ): MarginUncertainty | null {
 	if (pitchLineVelocity === null || velocityFactor === null) return null;
-	const share = velocityFactorShare(pitchLineVelocity, velocityLaw, recorder);
-	return marginUncertainty(uncertaintyOf(uncertainty), isPower(drive.load), share, recorder);
+	const doubt = { uncertainty: uncertaintyOf(uncertainty), byPower: isPower(drive.load) };
+	return pairUncertainty(pitchLineVelocity, laws, doubt, recorder);
 }
 
 function marginsOf(
 	figures: Figures,
-	rules: Rules,
-	uncertainty: MarginUncertainty | null,
+	{ rules, meshes, uncertainty }: { rules: Rules; meshes: boolean; uncertainty: MarginUncertainty | null },
 	recorder: Recorder
 ): Pick<Figures, 'bendingMarginLow' | 'limits' | 'limitedBy'> {
 	if (!uncertainty) return { bendingMarginLow: null, limits: [], limitedBy: null };
 	const { badEnd } = uncertainty;
-	const limits = limitsOf(figures, rules, badEnd);
+	const limits = meshes ? limitsOf(figures, rules, badEnd) : [];
 	return {
 		bendingMarginLow: figures.bendingMargin === null ? null : lowEnd(figures.bendingMargin, badEnd, recorder),
 		limits,
@@ -161,11 +166,8 @@ const DECIDES = {
 	unit: 'N',
 	source: SOURCES.definition
 };
-const WEAKEST: Record<LimitName, LineHead> = {
-	'gear-bending': { ...DECIDES, expression: 'WL' },
-	'mate-bending': { ...DECIDES, expression: 'WL' },
-	wear: { ...DECIDES, expression: 'Ww' }
-};
+const BY_TOOTH = { ...DECIDES, expression: 'WL' };
+const BY_FLANKS = { ...DECIDES, expression: 'Ww' };
 
 /** Where the gear's own teeth cannot be judged, nothing can be stated of the pair. */
 function permittedOf(
@@ -180,11 +182,15 @@ function permittedOf(
 		return { permittedPower: null, permittedTorque: null };
 	}
 	const factors = { needed: weakest.needed, serviceFactor, velocityFactor };
-	const borne = (weakest.answer === 'mate-bending' ? recorder.mate() : recorder).step(
-		WEAKEST[weakest.answer],
-		{ WL: weakest.force, Ww: weakest.force },
-		({ WL }) => WL
-	);
+	const { answer, force: bears } = weakest;
+	const borne =
+		answer === 'wear'
+			? recorder.step(BY_FLANKS, { Ww: bears }, ({ Ww }) => Ww)
+			: (answer === 'mate-bending' ? recorder.mate() : recorder).step(
+					BY_TOOTH,
+					{ WL: bears },
+					({ WL }) => WL
+				);
 	const force = permittedForce(borne, factors, recorder);
 	return {
 		permittedPower: permittedPowerOf(force, velocity, recorder),

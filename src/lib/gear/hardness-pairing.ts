@@ -1,10 +1,8 @@
-/** What about the two members' materials and finish a millwright should be told; none of it changes a verdict. */
-import type { Finish, Gear, Mate, Material, Reason } from './contract';
+/** What about the two members' materials and wear a millwright should be told; none of it changes a verdict. */
+import type { Gear, Mate, Material, Reason } from './contract';
 
 export function pairingWarnings(gear: Gear, mate: Mate): Reason[] {
-	return [reversedHardness(gear, mate), wornMate(mate), rougherMate(gear, mate)].filter(
-		(reason) => reason !== null
-	);
+	return [reversedHardness(gear, mate), wornMate(mate)].filter((reason) => reason !== null);
 }
 
 /** The pinion's teeth meet more often, so a hard pinion on a soft wheel is usual. Source: common practice. */
@@ -31,16 +29,5 @@ function wornMate({ worn }: Mate): Reason | null {
 	return {
 		code: 'mate-worn',
 		text: 'The mate is worn: a new gear on worn flanks wears fast and runs rough. Consider renewing both.'
-	};
-}
-
-const ROUGHEST_FIRST: readonly Finish[] = ['cast', 'cut', 'hobbed', 'ground'];
-
-/** The velocity law is that of the gear's own finish; a rougher mate adds to the dynamic load. */
-function rougherMate(gear: Gear, mate: Mate): Reason | null {
-	if (!mate.finish || ROUGHEST_FIRST.indexOf(mate.finish) >= ROUGHEST_FIRST.indexOf(gear.finish)) return null;
-	return {
-		code: 'mate-finish-rougher',
-		text: "The mate's teeth are rougher than this gear's: the dynamic load is then nearer to that of the mate's finish. Answer the check with the mate's finish as well."
 	};
 }

@@ -28,6 +28,27 @@ export function helixRefusal(gear: Member, mate: Member): Reason | null {
 	};
 }
 
+export const MATE_HELIX_MISSING: Reason = {
+	code: 'mate-helix-missing',
+	text: 'The mate is helical, and neither its helix angle nor one of this gear is given. Measure the helix angle of the mate and give it.'
+};
+
+/**
+ * How far in normal modules the teeth of a pair may seem to jam: both are commonly cut thinner than nominal, by up to
+ * about 0.05 modules each, so that much of a jam between nominal teeth can be backlash in truth. Common practice.
+ */
+const MOST_JAM = 0.1;
+
+/** Teeth that are thicker than the spaces by more than thinning explains do not go into each other. mm. */
+export function jamRefusal(normalBacklash: number | null, normalModule: number): Reason | null {
+	if (normalBacklash === null || !(-normalBacklash > MOST_JAM * normalModule)) return null;
+	return {
+		code: 'teeth-jam',
+		text: `The teeth are ${(-normalBacklash).toFixed(2)} mm too thick for this centre distance, more than any usual thinning makes up: they do not go into each other. Check the centre distance, the pitch and the tooth thicknesses.`,
+		values: { jam: -normalBacklash }
+	};
+}
+
 export function kindsRefusal(gear: Member, mate: Member): Reason | null {
 	const kinds = [gear.kind, mate.kind];
 	if (kinds.every((kind) => kind === 'internal' || kind === 'rack')) {
@@ -39,7 +60,8 @@ export function kindsRefusal(gear: Member, mate: Member): Reason | null {
 	const inner = kinds.indexOf('internal');
 	if (inner === -1) return null;
 	const [internal, pinion] = inner === 0 ? [gear, mate] : [mate, gear];
-	if ((internal.teeth ?? 0) > (pinion.teeth ?? 0)) return null;
+	// A count that is missing is asked for, not held against the other.
+	if (internal.teeth === null || pinion.teeth === null || internal.teeth > pinion.teeth) return null;
 	return {
 		code: 'internal-too-small',
 		text: 'An internal gear has more teeth than the pinion that runs in it. Check both counts.'

@@ -3,6 +3,7 @@
  * sentence says what is missing and what to do; `figures.ts` leaves out the figures that would need it.
  */
 import type { EvaluateInput, Finish, GearKind, Reason } from './contract';
+import type { MemberLaw } from './pair-law';
 import { fromSI } from './quantity';
 import type { VelocityLaw } from './velocity';
 
@@ -35,6 +36,15 @@ export function missingRefusals({ gear, drive }: EvaluateInput): Reason[] {
 	return reasons;
 }
 
+/** The velocity law that counts is the mate's: not what was said of this gear's own teeth. */
+export function mateLawTold(law: VelocityLaw): Reason {
+	return {
+		code: 'mate-law-counts',
+		text: `The velocity factor is that of the mate's ${LAW_WORDS[law]} teeth: both bear one dynamic load, and the mate's law gives the higher.`,
+		values: { law }
+	};
+}
+
 /** What the method knows only as a lower bound, or only for the common case, goes to review at best. */
 export function kindReview(gear: GearKind, mate: GearKind | undefined): Reason | null {
 	const kind = gear !== 'spur' ? gear : mate;
@@ -54,22 +64,34 @@ const FINISH_WORDS: Record<Finish, string> = {
 	ground: 'shaved or ground'
 };
 
-/** Velocities in m/s; `byPlant` when the end is the plant's own limit. */
-export function speedRefusal(
-	velocity: number,
-	end: number,
-	{ law, finish, byPlant }: { law: VelocityLaw; finish: Finish; byPlant: boolean }
-): Reason | null {
+export const LAW_WORDS: Record<VelocityLaw, string> = {
+	...FINISH_WORDS,
+	'cut-600': FINISH_WORDS.cut,
+	'non-metallic': 'non-metallic'
+};
+
+/** Velocity in m/s, against the law of the member that ends first. */
+export function speedRefusal(velocity: number, { law, finish, end, byPlant, of }: MemberLaw): Reason | null {
 	// The tolerance forgives the arithmetic of a velocity that is meant to be the end itself.
 	if (velocity >= 0 && velocity <= end * (1 + 1e-9)) return null;
-	const whose = byPlant
-		? `the plant allows for ${FINISH_WORDS[finish]} teeth`
-		: `the velocity law for ${law === 'non-metallic' ? 'non-metallic' : FINISH_WORDS[finish]} teeth is used to`;
-	return {
-		code: 'speed-beyond-law',
-		text: `The pitch-line velocity of ${velocities(velocity)} is beyond the ${velocities(end)} that ${whose}. Check speed and finish, or have the gear rated by an engineer.`,
-		values: { velocity, end, law }
-	};
+	const owner = of === 'mate' ? "the mate's " : '';
+	const whose =
+		byPlant && finish
+			? `the plant allows for ${owner}${FINISH_WORDS[finish]} teeth`
+			: `the velocity law for ${owner}${LAW_WORDS[law]} teeth is used to`;
+	const beyond = `The pitch-line velocity of ${velocities(velocity)} is beyond the ${velocities(end)} that ${whose}.`;
+	const values = { velocity, end, law };
+	return of === 'mate'
+		? {
+				code: 'mate-speed-beyond-law',
+				text: `${beyond} Check the speed and the mate's finish, or have the pair rated by an engineer.`,
+				values
+			}
+		: {
+				code: 'speed-beyond-law',
+				text: `${beyond} Check speed and finish, or have the gear rated by an engineer.`,
+				values
+			};
 }
 
 function velocities(velocity: number): string {

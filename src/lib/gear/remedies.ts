@@ -5,10 +5,10 @@
 import type { EvaluateInput, Finish, Gear, Quantity, Remedy, Verdict } from './contract';
 import { decidingOf, figuresOf, type FiguresAnswer } from './figures';
 import { toSI } from './quantity';
-import { rulesOf, uncertaintyOf } from './rules';
+import { firstToEnd } from './pair-law';
+import { uncertaintyOf } from './rules';
 import { speedThatCarries } from './speed-remedy';
 import { isPower } from './uncertainty';
-import { velocityEnd } from './velocity';
 import { meets } from './verdict';
 import { unrecorded } from './working';
 
@@ -81,13 +81,12 @@ function power({ input, answer, now, onlyLow }: Short): Remedy[] {
 
 function speed({ input, answer, now, onlyLow }: Short): Remedy[] {
 	const { pitchLineVelocity: velocity, pitchDiameter } = answer.figures;
-	const { gear, drive } = input;
 	if (velocity === null || !(velocity > 0)) return [];
 	const question = {
-		law: answer.law,
+		laws: answer.laws,
 		velocity,
-		end: velocityEnd(answer.law, gear.finish, rulesOf(input.rules).speedLimit),
-		byPower: isPower(drive.load),
+		end: firstToEnd(answer.laws).end,
+		byPower: isPower(input.drive.load),
 		ratio: now.ratio
 	};
 	const carriesAt = speedThatCarries({ ...question, badEndOf: uncertaintyOf(input.uncertainty) });
@@ -119,14 +118,18 @@ function faceWidth({ input, answer, now, onlyLow }: Short): Remedy[] {
 		at,
 		(width) => withGear(input, { faceWidth: at(width) }),
 		{ value, carriesAt },
-		original !== undefined && original >= value
+		original !== undefined && original >= Math.max(value, carriesAt ?? 0)
 	);
 }
 
+/** Smoother teeth help as far as the mate's own do not set the load: one that adds nothing to a plainer is left out. */
 function finishes({ input, onlyLow }: Short): Remedy[] {
 	const better = FINISHES.slice(FINISHES.indexOf(input.gear.finish) + 1);
-	return better.flatMap((finish) =>
+	const offered = better.flatMap((finish) =>
 		chosen('finish', finish, withGear(input, { finish }), onlyLow, input.original?.finish === finish)
+	);
+	return offered.filter(
+		({ bendingMargin }, place) => place === 0 || bendingMargin > (offered[place - 1]?.bendingMargin ?? 0)
 	);
 }
 

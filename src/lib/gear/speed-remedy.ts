@@ -3,12 +3,11 @@
  * the velocity factor falls; a power better at a higher one, since its force falls faster than the factor rises.
  */
 import type { Uncertainty } from './contract';
-import { marginUncertainty } from './uncertainty';
-import { barthVelocityFactor, velocityFactorShare, type VelocityLaw } from './velocity';
+import { pairUncertainty, pairVelocityFactor, type PairLaws } from './pair-law';
 
 export interface SpeedQuestion {
-	law: VelocityLaw;
-	/** Present pitch-line velocity and the end of the law's range, m/s. */
+	laws: PairLaws;
+	/** Present pitch-line velocity and the end of the range of these laws, m/s. */
 	velocity: number;
 	end: number;
 	byPower: boolean;
@@ -21,7 +20,7 @@ export interface SpeedQuestion {
 /** Below this share of the present speed it is another machine. Common practice. */
 const SLOWEST = 0.01;
 
-/** Velocity in m/s at which the answer has just what it needs; null where the law's range does not reach it. */
+/** Velocity in m/s at which the answer has just what it needs; null where the range of the laws does not reach it. */
 export function speedThatCarries(question: SpeedQuestion): number | null {
 	const { velocity, end, byPower } = question;
 	const has = (at: number) => ratioAt(question, at);
@@ -37,10 +36,8 @@ export function speedThatCarries(question: SpeedQuestion): number | null {
 	return enough;
 }
 
-function ratioAt({ law, velocity, byPower, ratio, badEndOf }: SpeedQuestion, at: number): number {
-	const factor = barthVelocityFactor(velocity, law) / barthVelocityFactor(at, law);
+function ratioAt({ laws, velocity, byPower, ratio, badEndOf }: SpeedQuestion, at: number): number {
+	const factor = pairVelocityFactor(velocity, laws) / pairVelocityFactor(at, laws);
 	const middle = ratio * factor * (byPower ? at / velocity : 1);
-	return badEndOf
-		? middle * marginUncertainty(badEndOf, byPower, velocityFactorShare(at, law)).badEnd
-		: middle;
+	return badEndOf ? middle * pairUncertainty(at, laws, { uncertainty: badEndOf, byPower }).badEnd : middle;
 }

@@ -22,6 +22,8 @@ export interface VerdictQuestion {
 	reviews: Reason[];
 	/** Are told beside every verdict that has figures. */
 	warnings: Reason[];
+	/** What a verdict that carries, now or after a review, does not cover. */
+	scope: Reason[];
 }
 
 /** A margin set to the needed one by arithmetic (a permitted power, a remedy) meets it. */
@@ -45,7 +47,7 @@ export function verdictOf(question: VerdictQuestion): VerdictAnswer {
 	return { verdict: 'not-permitted', reasons: [notPermitted, ...others] };
 }
 
-function judge({ limits, refusals, reviews, warnings }: VerdictQuestion): VerdictAnswer {
+function judge({ limits, refusals, reviews, warnings, scope }: VerdictQuestion): VerdictAnswer {
 	if (refusals.length > 0) return { verdict: 'cannot-say', reasons: [...refusals, ...warnings] };
 	const deciding = decidingOf(limits);
 	if (!deciding) return { verdict: 'cannot-say', reasons: [OUT_OF_RANGE, ...warnings] };
@@ -58,7 +60,6 @@ function judge({ limits, refusals, reviews, warnings }: VerdictQuestion): Verdic
 		const short = { code: say.codes.short, text, values };
 		return { verdict: 'will-not-carry', reasons: [short, ...reviews, ...warnings] };
 	}
-	const scope = scopeOf(limits);
 	if (!meets(low, needed)) {
 		const text = `The margin in ${say.of} is ${shown(margin)} and meets the needed ${needed}, but at the bad end of the uncertainty it is ${shown(low)}.`;
 		const close = { code: say.codes.low, text, values };
@@ -97,29 +98,6 @@ const SENTENCES: Record<LimitName, Sentence> = {
 			enough: 'mate-bending-margin'
 		}
 	}
-};
-
-/** What the verdict does not cover, because the input does not tell enough of the mate. */
-function scopeOf(limits: Limit[]): Reason[] {
-	const has = (name: LimitName) => limits.some(({ answer }) => answer === name);
-	if (!has('wear') && !has('mate-bending')) return [BENDING_ONLY];
-	if (!has('wear')) return [WEAR_NOT_KNOWN];
-	return has('mate-bending') ? [] : [MATE_BENDING_NOT_KNOWN];
-}
-
-const BENDING_ONLY: Reason = {
-	code: 'bending-only',
-	text: "This is bending of this gear's teeth only. For wear and for the mate's teeth, give the mate with its form, material and hardness."
-};
-
-const WEAR_NOT_KNOWN: Reason = {
-	code: 'wear-not-known',
-	text: 'Wear is not in this verdict: give modulus and hardness of both materials.'
-};
-
-const MATE_BENDING_NOT_KNOWN: Reason = {
-	code: 'mate-bending-not-known',
-	text: "Bending of the mate's teeth is not in this verdict: give its tooth form and material."
 };
 
 /** The outcome of a check that gives no figures: every field empty, the reasons say why. */

@@ -20,5 +20,10 @@
  *        to review. A worn tip gives a tooth no strength and goes to review. The low end is taken at the design point
  *        over the whole accepted range of doubts. Non-metallic teeth end at 3,000 ft/min, and no plant's limit extends
  *        a law.
+ *        One dynamic load for a pair: the harsher velocity law of gear and mate counts (was the gear's own), within the
+ *        range of both. Teeth of the mate that the method does not cover, interference and teeth that jam go to
+ *        review; a jam beyond thinning does not mesh. A spur mate has no helix of its gear; a helical one needs an
+ *        angle. Wear that is refused is not asked for again; non-metallic pairs are refused whatever is given. Nothing
+ *        is carried by a pair that does not mesh. A wider face is like for like only where it carries, too.
  */
 export const CORE_VERSION = '1.2.0';

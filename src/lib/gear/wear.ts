@@ -45,10 +45,13 @@ export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 	const none: WearAnswer = { strength: null, figures: null, refusal: null };
 	const { gear, mate, faceWidth, dynamicForce } = question;
 	const point = pitchPointOf(gear, mate);
-	const [own, mates] = [surfaceOf(question.gearMaterial), surfaceOf(question.mateMaterial)];
-	if (!point || !own || !mates) return none;
-	const refusal = wearRefusal(own, mates);
+	const { gearMaterial, mateMaterial } = question;
+	if (!point) return none;
+	// What no figure more would mend is said first; only then what is missing.
+	const refusal = wearRefusal(gearMaterial, mateMaterial);
 	if (refusal) return { ...none, refusal };
+	const [own, mates] = [surfaceOf(gearMaterial), surfaceOf(mateMaterial)];
+	if (!own || !mates) return none;
 
 	const { pinion, teeth, diameter, wheel, internal } = point;
 	const allowable = buckinghamSurfaceStrength(own.brinell, mates.brinell, recorder);
@@ -95,21 +98,31 @@ export function wearOf(question: WearQuestion, recorder: Recorder): WearAnswer {
 	);
 	if (dynamicForce === null) return { strength, figures: null, refusal: null };
 
-	const margin = (symbol: string, name: string, expression: string, bears: number) =>
-		recorder.step(
-			{ symbol, name, expression, unit: '1', source: SOURCES.definition },
-			{ Wh: bears, Fw: bears, W: dynamicForce },
-			({ Wh, W }) => Wh / W
-		);
 	const figures = {
 		contactStress: hertzContactStress(dynamicForce, line, recorder),
 		allowableContact: allowable,
-		contactMargin: margin('Mc', 'margin in wear by contact stress', 'Wh / W', byContact),
+		contactMargin: recorder.step(BY_CONTACT, { Wh: byContact, W: dynamicForce }, ({ Wh, W }) => Wh / W),
 		wearLoad,
-		wearLoadMargin: margin('Mw', 'margin in wear by limit load', 'Fw / W', wearLoad)
+		wearLoadMargin: recorder.step(BY_LIMIT_LOAD, { Fw: wearLoad, W: dynamicForce }, ({ Fw, W }) => Fw / W)
 	};
 	return { strength, figures, refusal: null };
 }
+
+const BY_CONTACT = {
+	symbol: 'Mc',
+	name: 'margin in wear by contact stress',
+	expression: 'Wh / W',
+	unit: '1',
+	source: SOURCES.definition
+};
+
+const BY_LIMIT_LOAD = {
+	symbol: 'Mw',
+	name: 'margin in wear by limit load',
+	expression: 'Fw / W',
+	unit: '1',
+	source: SOURCES.definition
+};
 
 interface PitchPoint {
 	pinion: Member;
@@ -145,7 +158,6 @@ function bySize(one: Member, other: Member): number {
 }
 
 interface Surface {
-	metallic: boolean;
 	brinell: number;
 	/** MPa. */
 	modulus: number;
@@ -154,8 +166,8 @@ interface Surface {
 
 function surfaceOf(material: Material | undefined): Surface | null {
 	if (!material?.modulus || material.brinell === undefined) return null;
-	const { metallic, brinell, modulus, poisson } = material;
-	return { metallic, brinell, modulus: toSI(modulus), poisson };
+	const { brinell, modulus, poisson } = material;
+	return { brinell, modulus: toSI(modulus), poisson };
 }
 
 /** Common practice: metals lie between 0.21 (grey iron) and 0.35 (bronze), and the square of it counts. */
@@ -177,13 +189,15 @@ function elasticOf({ modulus, poisson }: Surface, recorder: Recorder): Elastic {
 	return { modulus, poisson: common };
 }
 
-function wearRefusal(own: Surface, mates: Surface): Reason | null {
-	if (!own.metallic || !mates.metallic) {
+/** Needs no modulus, and of a material that is not metallic no hardness either. */
+function wearRefusal(own: Material, mates: Material | undefined): Reason | null {
+	if (!own.metallic || mates?.metallic === false) {
 		return {
 			code: 'wear-not-for-plastics',
 			text: 'The wear limit is for metal on metal; one of these is not metallic. Have the wear judged by an engineer.'
 		};
 	}
+	if (own.brinell === undefined || mates?.brinell === undefined) return null;
 	const brinell = (own.brinell + mates.brinell) / 2;
 	if (brinell >= BRINELL_RANGE.from && brinell <= BRINELL_RANGE.to) return null;
 	return {

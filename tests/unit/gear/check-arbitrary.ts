@@ -1,7 +1,4 @@
-/**
- * Random checks for property tests: `realistic` ones mostly have a margin, `allowed` ones fill the whole space that
- * the schema lets through.
- */
+/** Random checks for property tests that mostly have a margin. All that the schema lets through: schema-arbitrary.ts. */
 import fc from 'fast-check';
 import type { EvaluateInput, Gear, GearKind, Load, Material, Mate, Pitch } from '$lib/gear/contract';
 
@@ -171,36 +168,4 @@ export const realisticOfAllKinds = check({
 			profileShift: within(0, 0.4)
 		})
 	)
-});
-
-export const allowed = check({
-	kinds: ['spur', 'helical', 'internal', 'rack'],
-	teeth: fc.integer({ min: 1, max: 5000 }),
-	pitch: fc.oneof(
-		within(0.1, 500).map((value) => ({ system: 'diametral' as const, value })),
-		within(0.05, 250).map((value) => ({ system: 'module' as const, value })),
-		within(0.001, 800).map((value) => ({ system: 'circular' as const, value, unit: 'ft' as const }))
-	),
-	form: fc.oneof(
-		handbookForm,
-		fc.record({
-			form: fc.constant('full-depth' as const),
-			pressureAngle: within(5, 45),
-			profileShift: within(-2, 2)
-		}),
-		fc
-			.record({ addendum: within(0.1, 2), dedendum: within(0.1, 2.5), tipRadius: within(0, 1) })
-			.map((form) => ({ form, pressureAngle: 20 }))
-	),
-	faceWidth: size(0.1, 20_000, 'mm'),
-	material: material([0.01, 10_000], [0.001, 2000], [1, 1000]),
-	load: fc.oneof(
-		fc.constant('unknown' as const),
-		size(0.001, 1e9, 'W').map((power) => ({ power })),
-		size(1e-6, 1e9, 'N*m').map((torque) => ({ torque })),
-		size(1e-6, 1e9, 'N').map((tangentialForce) => ({ tangentialForce }))
-	),
-	rpm: within(0.001, 200_000),
-	centreDistance: size(0.1, 20_000, 'mm'),
-	uncertainty: [0, 0.5]
 });

@@ -1,6 +1,6 @@
-/** What a millwright is told of hardness, wear and finish of the two members, and what is usual enough to say nothing. */
+/** What a millwright is told of hardness and wear of the two members, and what is usual enough to say nothing. */
 import { describe, expect, test } from 'vitest';
-import type { Finish, Gear, Material, Mate } from '$lib/gear/contract';
+import type { Gear, Material, Mate } from '$lib/gear/contract';
 import { pairingWarnings } from '$lib/gear/hardness-pairing';
 
 const steel = (brinell: number | undefined): Material => ({
@@ -54,22 +54,9 @@ describe('a millwright is told', () => {
 		});
 	});
 
-	const ORDER: Finish[] = ['cast', 'cut', 'hobbed', 'ground'];
-	test.each(ORDER.flatMap((own) => ORDER.map((mates) => ({ own, mates }))))(
-		'of a rougher mate only: $own on $mates',
-		({ own, mates }) => {
-			const rougher = ORDER.indexOf(mates) < ORDER.indexOf(own);
-			expect(codes({ finish: own }, { finish: mates })).toEqual(rougher ? ['mate-finish-rougher'] : []);
-		}
-	);
-
 	test('of a worn mate, and all that there is to tell at once', () => {
 		expect(codes({}, { worn: true })).toEqual(['mate-worn']);
 		expect(codes({}, { worn: false })).toEqual([]);
-		expect(codes({}, { worn: true, finish: 'cast', material: steel(340) })).toEqual([
-			'hardness-reversed',
-			'mate-worn',
-			'mate-finish-rougher'
-		]);
+		expect(codes({}, { worn: true, material: steel(340) })).toEqual(['hardness-reversed', 'mate-worn']);
 	});
 });

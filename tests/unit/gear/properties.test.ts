@@ -11,6 +11,7 @@ import { fromSI, toSI, type Unit } from '$lib/gear/quantity';
 import { parseEvaluate } from '$lib/records/evaluate';
 import { MOST_UNCERTAIN } from '$lib/gear/uncertainty';
 import * as drawn from './check-arbitrary';
+import { allowed } from './schema-arbitrary';
 import {
 	LENGTH_UNITS,
 	POWER_UNITS,
@@ -30,7 +31,6 @@ const accepted = (input: EvaluateInput): EvaluateInput => {
 		uncertainty: { ...uncertainty, speed: Math.min(uncertainty.speed, MOST_UNCERTAIN.speed) }
 	};
 };
-const allowed = drawn.allowed.map(accepted);
 const realistic = drawn.realistic.map(accepted);
 const realisticOfAllKinds = drawn.realisticOfAllKinds.map(accepted);
 
@@ -153,6 +153,32 @@ test('a check stated in inches, horsepower and pounds gives the same outcome as 
 });
 
 describe('whatever the schema lets through', () => {
+	test('is really sampled: every kind of mate meshes, every law counts, every verdict and most reasons are given', () => {
+		const seen = new Set<string>();
+		for (const input of fc.sample(allowed, { numRuns: 3000, seed: 1 })) {
+			const outcome = evaluate(input);
+			seen.add(outcome.verdict).add(`law ${outcome.velocityLaw}`);
+			for (const { code } of outcome.reasons) seen.add(code);
+			for (const { change } of outcome.remedies) seen.add(`remedy ${change}`);
+			for (const { answer } of outcome.limits) seen.add(`limit ${answer}`);
+			if (outcome.mesh) seen.add(`${input.gear.kind} on ${input.mate?.kind}`);
+		}
+		// prettier-ignore
+		const meant = [
+			'carries', 'close', 'will-not-carry', 'not-permitted', 'cannot-say',
+			'law cast', 'law cut', 'law cut-600', 'law hobbed', 'law ground', 'law non-metallic',
+			'limit gear-bending', 'limit mate-bending', 'limit wear',
+			'remedy power', 'remedy speed', 'remedy faceWidth', 'remedy material',
+			'spur on spur', 'helical on helical', 'spur on internal', 'internal on spur', 'spur on rack', 'rack on spur',
+			'mate-law-counts', 'mate-speed-beyond-law', 'speed-beyond-law', 'mate-pitch-differs', 'mate-helix-differs',
+			'mate-helix-missing', 'mate-teeth-missing', 'kinds-do-not-mesh', 'internal-too-small',
+			'centres-too-close', 'contact-ratio-below-one', 'teeth-jam', 'interference', 'undercut', 'mate-worn',
+			'wear-not-for-plastics', 'wear-out-of-range', 'wear-not-known', 'tip-worn-away', 'compared-bending',
+			'speed-missing', 'load-unknown', 'torque-on-rack', 'velocity-missing'
+		];
+		expect(meant.filter((one) => !seen.has(one))).toEqual([]);
+	});
+
 	test('is answered in finite figures, the low margin never above the margin', () => {
 		fc.assert(
 			fc.property(fc.oneof(allowed, realistic, realisticOfAllKinds), (input) => {
@@ -212,22 +238,33 @@ test('a field overwritten with rubbish is refused, or answered without a number 
 	);
 });
 
+const REVIEWED = [
+	'kind-needs-review',
+	'contact-ratio-low',
+	'no-backlash',
+	'interference',
+	'wear-out-of-range',
+	'wear-not-for-plastics',
+	'mate-too-few-teeth',
+	'mate-angle-not-covered',
+	'mate-rack-tip-too-round',
+	'mate-shift-too-large',
+	'mate-undercut-too-deep',
+	'mate-tip-worn-away',
+	'mate-tip-below-pitch-circle',
+	'tips-worn',
+	'mate-tips-worn',
+	'mate-tooth-pointed',
+	'mate-tooth-too-short'
+];
+
 function expectVerdictFits(outcome: Outcome, input: EvaluateInput): void {
 	const { verdict, reasons } = outcome;
 	if (!input.gear.material.permitted) return expect(verdict).toBe('not-permitted');
 	if (verdict === 'cannot-say') return;
 	const { margin, marginLow, needed } = deciding(outcome);
 	const least = needed * (1 - 1e-9);
-	const review = reasons.some(({ code }) =>
-		[
-			'kind-needs-review',
-			'contact-ratio-low',
-			'wear-out-of-range',
-			'wear-not-for-plastics',
-			'tips-worn',
-			'mate-tips-worn'
-		].includes(code)
-	);
+	const review = reasons.some(({ code }) => REVIEWED.includes(code));
 	expect(verdict).toBe(margin < least ? 'will-not-carry' : marginLow < least || review ? 'close' : 'carries');
 }
 

@@ -139,6 +139,28 @@ describe('by name', () => {
 		expect(find(evaluate(weak()), 'faceWidth')).toBeUndefined();
 	});
 
+	test('a wider face is like for like only where the original was as wide as what carries at the bad end', () => {
+		const input = weak();
+		const at = (watts: number): EvaluateInput => ({
+			...input,
+			drive: { ...input.drive, load: { power: { value: watts, unit: 'W' } } }
+		});
+		// 10 % short: a tenth more carries at the middle, about a third more at the bad end.
+		const short = at((evaluate(input).permittedPower ?? NaN) * 1.1);
+		const face = find(evaluate(short), 'faceWidth');
+		const value = (face?.value as Quantity<'mm'>).value;
+		const carriesAt = (face?.carriesAt as Quantity<'mm'>).value;
+		expect(carriesAt).toBeGreaterThan(value * 1.1);
+		const was = (width: number) =>
+			find(
+				evaluate({ ...short, original: { ...input.gear, faceWidth: { value: width, unit: 'mm' } } }),
+				'faceWidth'
+			)?.likeForLike;
+		expect(was(value * 1.01)).toBe(false);
+		expect(was(carriesAt * 0.999)).toBe(false);
+		expect(was(carriesAt * 1.001)).toBe(true);
+	});
+
 	test('only permitted materials are offered, and like for like is what the original was', () => {
 		const input = weak();
 		const strong = (name: string, permitted: boolean) => ({

@@ -123,6 +123,11 @@ describe('no figure and no refusal where', () => {
 		expect(wear({ mateMaterial: undefined })).toEqual(NO_ANSWER);
 	});
 
+	test('the mate has no hardness, however hard the gear is', () => {
+		const mateMaterial = steel(250, { brinell: undefined });
+		expect(wear({ gearMaterial: steel(600), mateMaterial })).toEqual(NO_ANSWER);
+	});
+
 	test.each<[string, Partial<Pair>]>([
 		['the gear has no hardness', { gearMaterial: steel(300, { brinell: undefined }) }],
 		['the mate has no hardness', { mateMaterial: steel(250, { brinell: undefined }) }],
@@ -172,9 +177,23 @@ describe('the range of the published strength', () => {
 		expect(answer.refusal?.text).not.toMatch(/it is (150|400)\. /);
 	});
 
+	test('a mean outside is refused before a modulus is asked for', () => {
+		const soft = { modulus: undefined };
+		const answer = wear({ gearMaterial: steel(120, soft), mateMaterial: steel(120, soft) });
+		expect(answer.refusal?.code).toBe('wear-out-of-range');
+	});
+
 	test.each<[string, Partial<WearQuestion>]>([
 		['the gear', { gearMaterial: steel(300, { metallic: false }) }],
-		['the mate', { mateMaterial: steel(250, { metallic: false }) }]
+		['the mate', { mateMaterial: steel(250, { metallic: false }) }],
+		[
+			'the mate, of which no more is known,',
+			{ mateMaterial: steel(250, { metallic: false, brinell: undefined, modulus: undefined }) }
+		],
+		[
+			'the gear, whose mate is of no known material,',
+			{ gearMaterial: steel(300, { metallic: false, brinell: undefined }), mateMaterial: undefined }
+		]
 	])('it is for metal on metal: %s is not', (_which, change) => {
 		const answer = wear(change);
 		expect(answer).toMatchObject({ strength: null, figures: null });
@@ -194,6 +213,19 @@ describe('the working', () => {
 		const line = workingOf({ mateMaterial: iron }).find(({ symbol }) => symbol === 'K');
 		expect(line?.numbers).toContain('1 / 207000 + 1 / 105000');
 		expect(line?.source).toBe(SOURCES.buckingham);
+	});
+
+	test('each margin divides the force of its own method by the load', () => {
+		const lines = workingOf({ dynamicForce: 1500 });
+		const of = (symbol: string) => lines.find((line) => line.symbol === symbol);
+		for (const [margin, force] of [
+			['Mc', 'Wh'],
+			['Mw', 'Fw']
+		] as const) {
+			expect(of(margin)?.expression).toBe(`${force} / W`);
+			expect(of(margin)?.value).toBeCloseTo((of(force)?.value ?? NaN) / 1500, 12);
+		}
+		expect(of('Mc')?.numbers).not.toBe(of('Mw')?.numbers);
 	});
 
 	test.each<[string, Partial<WearQuestion>, (undefined | 'mate')[]]>([

@@ -215,6 +215,67 @@ export const reasons = {
 		'The mate is worn: a new gear on worn flanks wears fast and runs rough. Consider renewing both.',
 		'El conjugado está gastado: un engrane nuevo sobre flancos gastados se desgasta pronto y marcha áspero. Considere renovar ambos.'
 	],
+	'reason.mate-law-counts': [
+		"The velocity factor is that of the mate's teeth ({law}): both bear one dynamic load, and the mate's law gives the higher.",
+		'El factor de velocidad es el de los dientes del conjugado ({law}): ambos soportan una misma carga dinámica, y su ley da el mayor.'
+	],
+	'reason.mate-speed-beyond-law': [
+		"The pitch-line velocity of {velocity} is beyond {end}, the limit for the mate: {law}. Check the speed and the mate's finish, or have the pair rated by an engineer.",
+		'La velocidad en la línea de paso, {velocity}, supera {end}, el límite para el conjugado: {law}. Revise la velocidad y el acabado del conjugado, o pida a un ingeniero que evalúe el par.'
+	],
+	'reason.mate-teeth-missing': [
+		"The mate's number of teeth is missing, so this is bending of this gear's teeth only. For mesh, wear and the mate's teeth, count them and give it.",
+		'Falta el número de dientes del conjugado, así que esto es solo la flexión de los dientes de este engrane. Para el engranaje, el desgaste y los dientes del conjugado, cuéntelos y proporciónelo.'
+	],
+	'reason.mate-helix-missing': [
+		'The mate is helical, and neither its helix angle nor one of this gear is given. Measure the helix angle of the mate and give it.',
+		'El conjugado es helicoidal y no se dio su ángulo de hélice ni el de este engrane. Mida el ángulo de hélice del conjugado y proporciónelo.'
+	],
+	'reason.teeth-jam': [
+		'The teeth are {jam} mm too thick for this centre distance, more than any usual thinning makes up: they do not go into each other. Check the centre distance, the pitch and the tooth thicknesses.',
+		'Los dientes son {jam} mm demasiado gruesos para esta distancia entre centros, más de lo que compensa cualquier adelgazamiento usual: no entran unos en otros. Revise la distancia entre centros, el paso y los espesores.'
+	],
+	'reason.mate-tooth-not-covered': [
+		"The mate's teeth are outside the method. Have the mate rated by an engineer. Bending of the mate's teeth is not in this verdict.",
+		'Los dientes del conjugado quedan fuera del método. Pida a un ingeniero que lo evalúe. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-too-few-teeth': [
+		"The Lewis method starts at {fewest} teeth, the mate has {teeth}. Count them again, or have the mate rated by an engineer. Bending of the mate's teeth is not in this verdict.",
+		'El método de Lewis empieza en {fewest} dientes; el conjugado tiene {teeth}. Cuéntelos otra vez, o pida a un ingeniero que lo evalúe. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-angle-not-covered': [
+		"The mate's pressure angle of {pressureAngle} degrees in its normal plane is outside what the form factor covers. Check it, or have the mate rated by an engineer. Bending of the mate's teeth is not in this verdict.",
+		'El ángulo de presión del conjugado, {pressureAngle} grados en su plano normal, queda fuera de lo que cubre el factor de forma. Revíselo, o pida a un ingeniero que lo evalúe. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-rack-tip-too-round': [
+		"The tip radius and dedendum of the mate's tooth form leave its rack no tip. Check them. Bending of the mate's teeth is not in this verdict.",
+		'El radio de punta y el dedendo de la forma del conjugado no dejan punta a su cremallera. Revíselos. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-shift-too-large': [
+		"With the mate's profile shift its rack no longer reaches below the pitch circle. Check the mate's shift. Bending of the mate's teeth is not in this verdict.",
+		'Con la corrección de perfil del conjugado su cremallera ya no llega por debajo del círculo de paso. Revise esa corrección. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-undercut-too-deep': [
+		"The mate's teeth are undercut so deep that no flank is left below the pitch circle. Check the mate's teeth, angle and shift, or have it rated by an engineer. Bending of the mate's teeth is not in this verdict.",
+		'Los dientes del conjugado están tan socavados que no queda flanco bajo el círculo de paso. Revise sus dientes, ángulo y corrección, o pida a un ingeniero que lo evalúe. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-tip-worn-away': [
+		"The mate's tips are worn below the beginning of the flank. Check the wear of the mate's tips. Bending of the mate's teeth is not in this verdict.",
+		'Las puntas del conjugado están gastadas por debajo del inicio del flanco. Revise ese desgaste. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-tip-below-pitch-circle': [
+		"The mate's tips do not stand above its pitch circle: the Lewis method does not hold for such stubs. Check the wear of the mate's tips, its addendum and its shift. Bending of the mate's teeth is not in this verdict.",
+		'Las puntas del conjugado no sobresalen de su círculo de paso: el método de Lewis no vale para dientes así. Revise el desgaste de sus puntas, su adendo y su corrección. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-tooth-pointed': [
+		"The flanks of the mate's teeth meet below the tip circle. Check the mate's addendum and profile shift. Bending of the mate's teeth is not in this verdict.",
+		'Los flancos de los dientes del conjugado se juntan antes del círculo exterior. Revise su adendo y su corrección de perfil. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	'reason.mate-tooth-too-short': [
+		"The mate's teeth are so short that the load at the tip does not bend them. Check the mate's addendum and dedendum. Bending of the mate's teeth is not in this verdict.",
+		'Los dientes del conjugado son tan cortos que la carga en la punta no los flexiona. Revise su adendo y su dedendo. La flexión de los dientes del conjugado no entra en este veredicto.'
+	],
+	// Given until core 1.1.0: outcomes that were kept with it are still shown.
 	'reason.mate-finish-rougher': [
 		"The mate's teeth are rougher than this gear's: the dynamic load is then nearer to that of the mate's finish. Answer the check with the mate's finish as well.",
 		'Los dientes del conjugado son más bastos que los de este engrane: la carga dinámica se acerca entonces a la del acabado del conjugado. Responda la revisión también con ese acabado.'
@@ -265,6 +326,15 @@ export const reasons = {
 		'Too fast for {law}: {velocity}',
 		'Demasiado rápido para {law}: {velocity}'
 	],
+	'reason-short.mate-speed-beyond-law': [
+		"Too fast for the mate's {law}: {velocity}",
+		'Demasiado rápido para el conjugado, {law}: {velocity}'
+	],
+	'reason-short.mate-helix-missing': [
+		'Missing: helix angle of the mate',
+		'Falta: ángulo de hélice del conjugado'
+	],
+	'reason-short.teeth-jam': ['The teeth jam by {jam} mm', 'Los dientes se traban por {jam} mm'],
 	'reason-short.too-few-teeth': [
 		'{teeth} teeth; the method starts at {fewest}',
 		'{teeth} dientes; el método empieza en {fewest}'

@@ -37,6 +37,10 @@ export const working = {
 		'velocity factor, non-metallic',
 		'factor de velocidad, no metálicos'
 	],
+	'working.velocity factor of the pair, the higher of both': [
+		'velocity factor of the pair, the higher of both',
+		'factor de velocidad del par, el mayor de ambos'
+	],
 	'working.face width': ['face width', 'ancho de cara'],
 	'working.face width of this gear': ['face width of this gear', 'ancho de cara de este engrane'],
 	'working.face width of the mate': ['face width of the mate', 'ancho de cara del conjugado'],
@@ -126,6 +130,10 @@ export const working = {
 	'working.what the bad end leaves of the margin': [
 		'what the bad end leaves of the margin',
 		'lo que el extremo malo deja del margen'
+	],
+	'working.what the bad end leaves of the margin, by the law that falls faster here': [
+		'what the bad end leaves of the margin, by the law that falls faster here',
+		'lo que el extremo malo deja del margen, por la ley que aquí cae más rápido'
 	],
 	'working.ratio': ['ratio', 'relación'],
 	'working.standard centre distance': ['standard centre distance', 'distancia entre centros estándar'],
