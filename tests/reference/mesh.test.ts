@@ -3,9 +3,9 @@ import { describe, expect, test } from 'vitest';
 import { recommendedBacklash } from '$lib/gear/backlash';
 import { contactPath } from '$lib/gear/contact-path';
 import type { ToothedPart } from '$lib/gear/contract';
-import { isUndercut, memberOf, type Member } from '$lib/gear/member';
+import { isUndercut } from '$lib/gear/contact-on-flanks';
+import { memberOf, type Member } from '$lib/gear/member';
 import { meshOf } from '$lib/gear/mesh';
-import { straightDepth } from '$lib/gear/rack';
 import { unrecorded } from '$lib/gear/working';
 
 interface Textbook {
@@ -104,7 +104,7 @@ describe('fewest teeth that the rack does not undercut', () => {
 	])('%d degrees, addendum %d: %d', (angle, addendum, fewest) => {
 		const cut = (teeth: number) => {
 			const member = gear(teeth, { angle, addendum });
-			return isUndercut(member, straightDepth(member.rack));
+			return isUndercut(member);
 		};
 		expect(cut(fewest)).toBe(false);
 		expect(cut(fewest - 1)).toBe(true);

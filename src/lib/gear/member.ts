@@ -126,11 +126,3 @@ export function virtualTeeth(teeth: number, helixAngle: number, recorder: Record
 		({ N }) => N / Math.cos(helixAngle) ** 3
 	);
 }
-
-/** Whether the generating rack cuts into the involute at the root: (hs - x) mn > r sin² αt, hs its straight depth. */
-export function isUndercut(member: Member, straight: number): boolean {
-	const { kind, pitchDiameter, normalModule, transverseAngle, profileShift } = member;
-	if (pitchDiameter === null || kind === 'internal') return false;
-	const depth = (straight - profileShift) * normalModule;
-	return depth > (pitchDiameter / 2) * Math.sin(transverseAngle) ** 2 * (1 + 1e-9);
-}

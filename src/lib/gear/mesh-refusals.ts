@@ -1,5 +1,6 @@
 /** Why two members do not mesh at all: it comes before any strength. Lengths in mm. */
 import type { Reason } from './contract';
+import { basePitch } from './measure/span';
 import type { Member } from './member';
 
 /** Two gears of the same standard pitch agree far better than this, two of neighbouring pitches far worse. */
@@ -10,8 +11,8 @@ const SAME_HELIX = (0.5 * Math.PI) / 180;
 
 /** A mate of another base pitch does not mesh, whatever the strength. Compared in the normal plane. */
 export function basePitchRefusal(gear: Member, mate: Member): Reason | null {
-	const basePitch = ({ normalModule, normalAngle }: Member) => Math.PI * normalModule * Math.cos(normalAngle);
-	const [own, mates] = [basePitch(gear), basePitch(mate)];
+	const own = basePitch(gear.normalModule, gear.normalAngle);
+	const mates = basePitch(mate.normalModule, mate.normalAngle);
 	if (Math.abs(mates / own - 1) <= SAME_BASE_PITCH) return null;
 	return {
 		code: 'mate-pitch-differs',

@@ -3,6 +3,7 @@
  * far as the laws of both reach: a pair gets the same factor whichever of its gears is asked about.
  */
 import type { Finish, Gear, Mate, Rules, Uncertainty } from './contract';
+import { toSI } from './quantity';
 import { SOURCES } from './sources';
 import { marginUncertainty, type MarginUncertainty } from './uncertainty';
 import {
@@ -21,7 +22,7 @@ export interface MemberLaw {
 	finish: Finish | undefined;
 	/** m/s. */
 	end: number;
-	/** The end is the plant's own limit. */
+	/** The end is the plant's own limit: one beyond the law's furthest end is not. */
 	byPlant: boolean;
 	of?: 'mate' | undefined;
 }
@@ -42,7 +43,9 @@ function memberLaw(finish: Finish | undefined, metallic: boolean, { cutLaw, spee
 		return { law: 'non-metallic', finish, end: velocityEnd('non-metallic', 'cut', none), byPlant: false };
 	}
 	const law = velocityLawOf(finish, metallic, cutLaw);
-	return { law, finish, end: velocityEnd(law, finish, speedLimit), byPlant: speedLimit[finish] !== null };
+	const end = velocityEnd(law, finish, speedLimit);
+	const limit = speedLimit[finish];
+	return { law, finish, end, byPlant: limit !== null && toSI(limit) <= end };
 }
 
 /** The member whose law ends first: beyond it nobody knows which of the two is the harsher. */
