@@ -138,7 +138,7 @@ export const tablet = {
 	'measure.nothing-on-record': ['Nothing on record here', 'Nada registrado aquí'],
 	'measure.again': ['Measure again', 'Medir otra vez'],
 	'measure.repeats': ['last of {n}, spread {spread}', 'última de {n}, dispersión {spread}'],
-	'measure.count-blind': ['Count without looking at the first count', 'Cuente sin mirar el primer conteo'],
+	'measure.count-blind': ['Do not look at the first', 'Sin ver el primero'],
 	'count.differ': [
 		'{first} first, {second} now. Count once more and correct the wrong one.',
 		'Primero {first}, ahora {second}. Cuente otra vez y corrija el equivocado.'
